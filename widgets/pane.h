@@ -36,6 +36,11 @@ class Pane : public QWidget {
     /// "Magnitude": the name in the pane's head and in menus.
     virtual QString title() const = 0;
 
+    /// Legend and small switches for the right side of the pane's head, null if there are none.
+    /// Made by the pane, taken into the layout of the head. The pane's commands (copy, save,
+    /// what to show) are its QWidget::actions().
+    virtual QWidget* headWidget() { return nullptr; }
+
   signals:
     /// A drag begins; `what` names the undo step ("Move zero of lead").
     void dragStarted(const QString& what);
