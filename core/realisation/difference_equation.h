@@ -11,19 +11,23 @@
 namespace cornerwright {
 
 /// One second-order section as it runs, after rounding to the number format.
-/// Direct forms: y = b0 x + b1 x' + b2 x'' - a1 y' - a2 y'' with b/2^0 as given; a[0] is 1.
+/// Direct forms: y = b0 x + b1 x' + b2 x'' - a1 y' - a2 y''; a[0] is 1.
 /// Delta: the same function written with d = z - 1,
-///   (beta0 d^2 + beta1 d + beta2) / (d^2 + alpha1 d + alpha2), whose rounded coefficients run; b
-///   and
-/// a are then the exactly equal shift-operator coefficients as far as a double can tell them.
+///   (beta0 d^2 + beta1 d + beta2) / (d^2 + alpha1 d + alpha2), whose rounded coefficients run.
+/// The form that does not run holds the equal coefficients as far as a double can tell them. A
+/// first-order section is (b0 z + b1)/(z + a1) = (beta0 d + beta1)/(d + alpha1), the last entries
+/// 0.
 struct DiscreteSection {
     std::array<double, 3> b{1.0, 0.0, 0.0};
     std::array<double, 3> a{1.0, 0.0, 0.0};
     std::array<double, 3> beta{1.0, 0.0, 0.0};
     std::array<double, 3> alpha{1.0, 0.0, 0.0}; ///< alpha[0] = 1
-    std::array<std::int64_t, 3> b_integers{};   ///< fixed only
-    std::array<std::int64_t, 3> a_integers{};   ///< fixed only
-    int shift = 0; ///< fixed only: b = b_integers / 2^(fraction_bits - shift)
+    /// Fixed only: b = b_integers / 2^(fraction_bits - shift), a likewise. In the delta structure
+    /// they are beta and alpha, entry i over 2^(fraction_bits - shift + i delta_shift).
+    std::array<std::int64_t, 3> b_integers{};
+    std::array<std::int64_t, 3> a_integers{};
+    int shift = 0;
+    int delta_shift = 0;
 
     bool operator==(const DiscreteSection&) const = default;
 };
