@@ -1,0 +1,21 @@
+#pragma once
+
+#include "core/measurement/preview_measurement.h"
+#include "core/measurement/table_columns.h"
+#include "core/measurement/table_layout.h"
+
+#include <vector>
+
+namespace cornerwright {
+
+/// What was understood of a table so far, also when reading it ends in an error.
+struct TableReport {
+    TableLayout layout;
+    TableColumns columns;
+    std::vector<OpenChoice> choices;
+};
+
+/// Reads a text table as a frequency response. Throws InputError.
+ReadResult read_table(TextLines& lines, const ReadOptions& options, TableReport& report);
+
+} // namespace cornerwright

@@ -1,0 +1,65 @@
+#include "core/measurement/response_edits.h"
+
+#include "core/numerics/error.h"
+
+#include <cmath>
+#include <complex>
+
+namespace cornerwright {
+namespace {
+
+void require_compensator(const MeasuredResponse& measured, std::span<const Complex> compensator) {
+    if (compensator.size() != measured.response.size())
+        throw InputError({},
+                         std::to_string(measured.response.size()) + " values of the compensator",
+                         std::to_string(compensator.size()));
+    for (const Complex value : compensator)
+        if (value == 0.0 || !std::isfinite(std::abs(value)))
+            throw InputError({},
+                             "a compensator that is neither zero nor infinite on the measured band",
+                             "one that is");
+}
+
+void require_usable(const MeasuredResponse& measured, const char* found) {
+    for (const Complex value : measured.response)
+        if (value == 0.0 || !std::isfinite(value.real()) || !std::isfinite(value.imag()))
+            throw InputError({}, "a measurement that gives a finite plant", found);
+}
+
+} // namespace
+
+MeasuredResponse with_sign_flipped(MeasuredResponse measured) {
+    for (Complex& value : measured.response)
+        value = -value;
+    return measured;
+}
+
+MeasuredResponse with_delay_removed(MeasuredResponse measured, double delay_s) {
+    for (std::size_t i = 0; i < measured.response.size(); ++i) {
+        const double angle = measured.w_rad_s[i] * delay_s;
+        measured.response[i] *= Complex{std::cos(angle), std::sin(angle)};
+    }
+    return measured;
+}
+
+MeasuredResponse plant_from_loop_gain(MeasuredResponse loop_gain,
+                                      std::span<const Complex> compensator) {
+    require_compensator(loop_gain, compensator);
+    for (std::size_t i = 0; i < compensator.size(); ++i)
+        loop_gain.response[i] /= compensator[i];
+    require_usable(loop_gain, "a loop gain that does not");
+    return loop_gain;
+}
+
+MeasuredResponse plant_from_closed_loop(MeasuredResponse closed_loop,
+                                        std::span<const Complex> compensator) {
+    require_compensator(closed_loop, compensator);
+    for (std::size_t i = 0; i < compensator.size(); ++i) {
+        const Complex t = closed_loop.response[i];
+        closed_loop.response[i] = t / (compensator[i] * (1.0 - t));
+    }
+    require_usable(closed_loop, "a closed loop of exactly 1 somewhere");
+    return closed_loop;
+}
+
+} // namespace cornerwright

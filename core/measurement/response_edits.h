@@ -1,0 +1,26 @@
+#pragma once
+
+#include "core/response/measured_response.h"
+
+#include <span>
+
+namespace cornerwright {
+
+/// The response with its sign turned, as after an inverting injection.
+MeasuredResponse with_sign_flipped(MeasuredResponse measured);
+
+/// The response without a known delay: multiplied by exp(+jw delay).
+MeasuredResponse with_delay_removed(MeasuredResponse measured, double delay_s);
+
+/// P = L/C from a measured loop gain L and the compensator's response at the same frequencies.
+/// Throws InputError where the numbers of points differ, or C is zero or not finite somewhere.
+MeasuredResponse plant_from_loop_gain(MeasuredResponse loop_gain,
+                                      std::span<const Complex> compensator);
+
+/// P = T/(C (1 - T)) from a measured complementary sensitivity T. Where |L| is large, 1 - T is a
+/// small difference and the plant inherits its error. Throws InputError as above, and where T is
+/// exactly 1.
+MeasuredResponse plant_from_closed_loop(MeasuredResponse closed_loop,
+                                        std::span<const Complex> compensator);
+
+} // namespace cornerwright
