@@ -77,15 +77,18 @@ IntegerSection integer_section(const ScaledSection& section, const Realisation& 
 }
 
 /// Whether the coefficients fit into the word and no sum of products of word-sized signals can
-/// leave twice the word, each stored state counting as a coefficient of 1.
-bool fits(const IntegerSection& c, const Realisation& realisation, int shift) {
+/// leave twice the word: each stored state counts as a coefficient of 1, and half of what the shift
+/// back divides by is added before it.
+bool fits(const IntegerSection& c, const Realisation& realisation, int shift, int delta_shift) {
     const NumberFormat& format = realisation.number_format;
     const std::int64_t word = std::int64_t{1} << (format.word_bits - 1);
     for (std::size_t i = 0; i < 3; ++i)
         if (std::abs(c.b[i]) >= word || (i > 0 && std::abs(c.a[i]) >= word))
             return false;
-    const std::int64_t one = std::int64_t{1} << (format.fraction_bits - shift);
-    const std::int64_t limit = 2 * word - 1;
+    const int bits = format.fraction_bits - shift;
+    const std::int64_t one = std::int64_t{1} << bits;
+    const int half_bits = std::max(bits + delta_shift - format.word_bits, 0);
+    const std::int64_t limit = 2 * word - (std::int64_t{1} << half_bits);
     const auto term = [&c](std::size_t i) { return std::abs(c.b[i]) + std::abs(c.a[i]); };
     if (realisation.structure == Structure::direct_form_1)
         return std::abs(c.b[0]) + term(1) + term(2) <= limit;
@@ -95,7 +98,8 @@ bool fits(const IntegerSection& c, const Realisation& realisation, int shift) {
 std::optional<int> smallest_shift(const ScaledSection& section, const Realisation& realisation,
                                   int delta_shift) {
     for (int shift = 0; shift <= realisation.number_format.fraction_bits; ++shift)
-        if (fits(integer_section(section, realisation, shift, delta_shift), realisation, shift))
+        if (fits(integer_section(section, realisation, shift, delta_shift), realisation, shift,
+                 delta_shift))
             return shift;
     return std::nullopt;
 }

@@ -1,5 +1,6 @@
 #include "core/realisation/node_bounds.h"
 
+#include "core/realisation/linear_section.h"
 #include "core/realisation/quadratic.h"
 #include "core/realisation/section_coefficients.h"
 
@@ -12,39 +13,6 @@ namespace {
 
 constexpr double infinity = std::numeric_limits<double>::infinity();
 
-/// One section on doubles, stepped as its structure stores its states.
-class LinearSection {
-  public:
-    LinearSection(const DiscreteSection& section, Structure structure)
-        : section_(&section), delta_(structure == Structure::delta) {
-        if (delta_)
-            scale_ = std::ldexp(1.0, section.delta_shift);
-    }
-
-    double step(double x) {
-        if (delta_) {
-            const double y = section_->beta[0] * x + w_[0];
-            w_[0] += section_->beta[1] * x - section_->alpha[1] * y + w_[1];
-            w_[1] += section_->beta[2] * x - section_->alpha[2] * y;
-            return y;
-        }
-        const double y = section_->b[0] * x + w_[0];
-        w_[0] = section_->b[1] * x - section_->a[1] * y + w_[1];
-        w_[1] = section_->b[2] * x - section_->a[2] * y;
-        return y;
-    }
-
-    double size(std::size_t state) const {
-        return std::abs(w_[state]) * (state == 1 ? scale_ : 1.0);
-    }
-
-  private:
-    const DiscreteSection* section_;
-    bool delta_;
-    double scale_ = 1.0;
-    std::array<double, 2> w_{};
-};
-
 /// Sections up to the first with an integrator: behind it nothing is bounded.
 std::size_t bounded_sections(std::span<const DiscreteSection> sections, Structure structure) {
     const auto first = std::ranges::find_if(sections, [structure](const DiscreteSection& section) {
@@ -53,7 +21,14 @@ std::size_t bounded_sections(std::span<const DiscreteSection> sections, Structur
     return static_cast<std::size_t>(first - sections.begin());
 }
 
-/// |pole| of the slowest mode.
+void add_sizes(NodeBounds& bounds, double output, const LinearSection<double>& section,
+               double weight) {
+    bounds.output += weight * std::abs(output);
+    for (std::size_t state = 0; state < 2; ++state)
+        bounds.states[state] += weight * std::abs(section.stored(state));
+}
+
+/// |pole| of the slowest mode that is not an integrator.
 double slowest_radius(std::span<const DiscreteSection> sections) {
     double radius = 0.0;
     for (const DiscreteSection& section : sections)
@@ -64,47 +39,44 @@ double slowest_radius(std::span<const DiscreteSection> sections) {
     return radius;
 }
 
-void add_sizes(NodeBounds& bounds, double output, const LinearSection& section) {
-    bounds.output += std::abs(output);
-    for (std::size_t state = 0; state < 2; ++state)
-        bounds.states[state] += section.size(state);
-}
-
 } // namespace
+
+ImpulseLength impulse_length(std::span<const DiscreteSection> sections) {
+    constexpr double time_constants = 20.0;
+    constexpr double fewest = 64.0;
+    constexpr double most = 200000.0;
+    const double radius = slowest_radius(sections);
+    if (radius >= 1.0)
+        return {0, 0.0, false};
+    const double time_constant = radius > 0.0 ? -1.0 / std::log(radius) : 0.0;
+    const double samples = std::ceil(time_constants * time_constant);
+    return {static_cast<int>(std::clamp(samples, fewest, most)),
+            samples > most ? time_constant : 0.0, true};
+}
 
 double NodeBounds::largest() const {
     return std::max({output, states[0], states[1]});
 }
 
 std::vector<NodeBounds> l1_bounds(std::span<const DiscreteSection> sections, Structure structure) {
-    // The sum runs over this many time constants of the slowest mode (the rest is below e^-20 of
-    // the whole), within limits that keep the slowest corners at the highest rates affordable;
-    // what is then left is added as a geometric tail.
-    constexpr double time_constants = 20.0;
-    constexpr double fewest = 64.0;
-    constexpr double most = 200000.0;
-
     const std::size_t bounded = bounded_sections(sections, structure);
     std::vector<NodeBounds> bounds(sections.size(), NodeBounds{infinity, {infinity, infinity}});
-    std::vector<LinearSection> run;
+    std::vector<LinearSection<double>> run;
     for (std::size_t i = 0; i < bounded; ++i) {
         run.emplace_back(sections[i], structure);
         bounds[i] = {};
     }
-    const double radius = slowest_radius(sections.first(bounded));
-    if (radius >= 1.0) { // rounding pushed a pole out of the unit circle
+    const ImpulseLength length = impulse_length(sections.first(bounded));
+    if (!length.decays) { // rounding pushed a pole out of the unit circle
         std::ranges::fill(bounds, NodeBounds{infinity, {infinity, infinity}});
         return bounds;
     }
-    const double time_constant = radius > 0.0 ? -1.0 / std::log(radius) : 0.0;
-    const double steps = std::clamp(time_constants * time_constant, fewest, most);
-    const double tail = std::ceil(steps) < most ? 0.0 : time_constant;
-    for (double n = 0.0; n < steps; n += 1.0) {
-        double signal = n == 0.0 ? 1.0 : 0.0;
-        const bool last = n + 1.0 >= steps;
+    for (int n = 0; n < length.samples; ++n) {
+        double signal = n == 0 ? 1.0 : 0.0;
+        const double weight = n + 1 == length.samples ? 1.0 + length.tail : 1.0;
         for (std::size_t i = 0; i < bounded; ++i) {
             signal = run[i].step(signal);
-            add_sizes(bounds[i], last ? signal * (1.0 + tail) : signal, run[i]);
+            add_sizes(bounds[i], signal, run[i], weight);
         }
     }
     if (structure == Structure::direct_form_1)

@@ -21,6 +21,18 @@ struct NodeBounds {
     double largest() const;
 };
 
+/// How long an impulse is followed: 20 time constants of the slowest mode (what is left is e^-20 of
+/// the whole), within limits that keep the slowest corners at the highest rates affordable. `tail`
+/// is then what remains behind the last sample, in units of that sample, as a geometric series.
+/// Integrators are left out.
+struct ImpulseLength {
+    int samples = 0;
+    double tail = 0.0;
+    bool decays = true;
+};
+
+ImpulseLength impulse_length(std::span<const DiscreteSection> sections);
+
 std::vector<NodeBounds> l1_bounds(std::span<const DiscreteSection> sections, Structure structure);
 
 } // namespace cornerwright

@@ -2,6 +2,7 @@
 
 #include "core/numerics/error.h"
 #include "core/numerics/number_text.h"
+#include "core/realisation/fixed_sections.h"
 
 #include <cmath>
 #include <numbers>
@@ -59,6 +60,20 @@ void check_format(const Realisation& realisation) {
                              text(realisation.output_limits->at_most));
 }
 
+void check_limits_fit(const Realisation& realisation) {
+    if (!realisation.output_limits || realisation.number_format.type != NumberFormat::Type::fixed)
+        return;
+    const double range = range_of(realisation.number_format);
+    const double step = std::ldexp(1.0, -realisation.number_format.fraction_bits);
+    for (const double limit :
+         {realisation.output_limits->at_least, realisation.output_limits->at_most})
+        if (limit < -range || limit > range - step)
+            throw InputError({},
+                             "output limits within the range of the word, " + text(-range) +
+                                 " to " + text(range - step),
+                             text(limit));
+}
+
 void check_section(const Section& section, std::size_t index, double period, Method method) {
     check(section);
     const double half_rate = std::numbers::pi / period;
@@ -85,6 +100,7 @@ void check_realisable(const Chain& chain, const Sampling& sampling,
                       const Realisation& realisation) {
     check_sampling(sampling, realisation);
     check_format(realisation);
+    check_limits_fit(realisation);
     const RootForm compensator = roots_of(chain);
     if (!compensator.is_proper())
         throw InputError({}, "a compensator with no more zeros than poles to realise",
