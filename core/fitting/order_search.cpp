@@ -71,15 +71,25 @@ Candidate best_start(const SearchTask& task, int order, double delay, const Cand
     const double low = task.points.w.front();
     const double high = task.points.w.back();
     const auto from = [&](ComplexVector poles) {
-        return refined(
-            task, relocate(task.points, std::move(poles), delay, task.stable, relocation_rounds));
+        FactoredModel model =
+            relocate(task.points, std::move(poles), delay, task.stable, relocation_rounds);
+        const double cost = weighted_cost(model, task.points);
+        return rated(task, std::move(model), cost);
     };
-    std::optional<Candidate> best;
-    take_better(best, from(spread_pairs(low, high, order)));
-    if (!is_exact(task, *best))
-        take_better(best, from(spread_real(low, high, order)));
-    if (lower && !is_exact(task, *best) && degree_of(lower->model.poles) < order)
-        take_better(best, from(grown_poles(task, *lower, order)));
+    std::vector<Candidate> starts{from(spread_pairs(low, high, order))};
+    if (!is_exact(task, starts.front()))
+        starts.push_back(from(spread_real(low, high, order)));
+    if (lower && !is_exact(task, starts.front()) && degree_of(lower->model.poles) < order)
+        starts.push_back(from(grown_poles(task, *lower, order)));
+    std::sort(starts.begin(), starts.end(),
+              [](const Candidate& a, const Candidate& b) { return a.cost < b.cost; });
+    // A start within a twentieth of the best one is most often the same valley.
+    constexpr double same_valley = 1.05;
+    std::optional<Candidate> best = refined(task, starts.front().model);
+    for (std::size_t i = 1; i < starts.size() && !is_exact(task, *best); ++i) {
+        if (starts[i].cost > same_valley * starts.front().cost)
+            take_better(best, refined(task, starts[i].model));
+    }
     return *best;
 }
 
@@ -160,7 +170,9 @@ Candidate settled(const SearchTask& task, const Candidate& found) {
                                  std::abs(response_at(best.model, task.points.w[i]));
             reweighted.points.weight[i] *= std::clamp(ratio, 1.0 / most, most);
         }
-        best = tidied(reweighted, refined(reweighted, best.model));
+        best = refined(reweighted, best.model);
+        if (round + 1 == rounds)
+            best = tidied(reweighted, std::move(best));
     }
     return best;
 }

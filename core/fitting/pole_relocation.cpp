@@ -11,6 +11,11 @@ namespace {
 
 using Eigen::Index;
 
+/// 1/z without the guards of the library's division.
+Complex inverse_of(Complex z) {
+    return std::conj(z) / std::norm(z);
+}
+
 /// Conjugate pairs adjacent, the upper one first; real poles first.
 ComplexVector in_pair_order(const ComplexVector& poles) {
     ComplexVector ordered;
@@ -31,12 +36,12 @@ ComplexVector in_pair_order(const ComplexVector& poles) {
 void fill_basis(const ComplexVector& poles, Complex s, ComplexVector& basis) {
     basis.resize(poles.size());
     for (std::size_t i = 0; i < poles.size(); ++i) {
-        const Complex first = 1.0 / (s - poles[i]);
+        const Complex first = inverse_of(s - poles[i]);
         if (poles[i].imag() == 0.0) {
             basis[i] = first;
             continue;
         }
-        const Complex second = 1.0 / (s - poles[i + 1]);
+        const Complex second = inverse_of(s - poles[i + 1]);
         basis[i] = first + second;
         basis[i + 1] = Complex(0.0, 1.0) * (first - second);
         ++i;
@@ -100,7 +105,7 @@ ComplexVector moved_poles(const FitPoints& points, const ComplexVector& response
     for (Index k = 0; k < rows; ++k) {
         const auto i = static_cast<std::size_t>(k);
         fill_basis(poles, {0.0, points.w[i]}, basis);
-        const Complex weight = points.weight[i] / response[i];
+        const Complex weight = points.weight[i] * inverse_of(response[i]);
         const auto set = [&](Index column, Complex value) {
             matrix(2 * k, column) = value.real();
             matrix(2 * k + 1, column) = value.imag();
@@ -137,7 +142,7 @@ FactoredModel with_residues(const FitPoints& points, const ComplexVector& respon
         const auto i = static_cast<std::size_t>(k);
         fill_basis(poles, {0.0, points.w[i]}, basis);
         basis.emplace_back(1.0);
-        const Complex weight = points.weight[i] / response[i];
+        const Complex weight = points.weight[i] * inverse_of(response[i]);
         for (Index j = 0; j <= n; ++j) {
             const Complex value = weight * basis[static_cast<std::size_t>(j)];
             matrix(2 * k, j) = value.real();
@@ -193,7 +198,7 @@ ComplexVector spread_real(double w_low, double w_high, int count) {
 
 FactoredModel relocate(const FitPoints& points, ComplexVector poles, double delay_s, bool stable,
                        int rounds) {
-    constexpr double at_rest = 1e-10;
+    constexpr double at_rest = 1e-7;
     const ComplexVector response = without_delay(points, delay_s);
     poles = in_pair_order(poles);
     for (int round = 0; round < rounds; ++round) {
