@@ -39,9 +39,9 @@ std::optional<Complex> newton(const DelayedSum& function, Complex s, const Compl
 }
 
 /// Roots of the rational approximation exp(-x) = ((1 - x/2m)/(1 + x/2m))^m, near the true ones
-/// where |s| delay is below m; the open loop's poles, near light resonances of little gain; and
-/// for the branches of the logarithm, s = (ln(-L0(s)) + 2 pi i l)/delay, one step from L0(s) on the
-/// axis, near the chain of roots that the dead time makes.
+/// where |s| delay is below m; the open loop's poles and zeros, where the loop has little or much
+/// gain; and for the branches of the logarithm, s = (ln(-L0(s)) + 2 pi i l)/delay, one step from
+/// L0(s) on the axis, near the chain of roots that the dead time makes.
 ComplexVector start_points(const DelayedSum& function, double imag_high) {
     constexpr int order = 8;
     FactorList left = function.sum.left();
@@ -54,6 +54,7 @@ ComplexVector start_points(const DelayedSum& function, double imag_high) {
     iterate_roots(approximation, points);
 
     points.insert(points.end(), left.roots.begin(), left.roots.end());
+    points.insert(points.end(), right.roots.begin(), right.roots.end());
 
     constexpr double most_chain_links = 400.0;
     const double spacing = 2.0 * std::numbers::pi / function.delay;
@@ -69,12 +70,22 @@ ComplexVector start_points(const DelayedSum& function, double imag_high) {
     return points;
 }
 
-void keep_new(ComplexVector& found, Complex root, double resolution) {
-    const bool known = std::any_of(found.begin(), found.end(), [&](Complex other) {
-        return std::abs(other - root) <= resolution * std::abs(root);
-    });
-    if (!known)
-        found.push_back(root);
+/// Points all over the upper half plane, evenly in the logarithm of the distance from the origin.
+ComplexVector net_points(const DelayedSum& function, double reach) {
+    double nearest = 1.0 / function.delay;
+    for (const FactorList* list : {&function.sum.left(), &function.sum.right()})
+        for (const Complex& root : list->roots)
+            if (root != Complex(0.0))
+                nearest = std::min(nearest, std::abs(root));
+    constexpr int radii = 16;
+    constexpr int angles = 9;
+    ComplexVector points;
+    for (int k = 0; k < radii; ++k)
+        for (int j = 0; j < angles; ++j)
+            points.push_back(
+                std::polar(0.3 * nearest * std::pow(4.0 * reach / nearest, k / (radii - 1.0)),
+                           std::numbers::pi * (j + 0.5) / angles));
+    return points;
 }
 
 /// The angle of F from one corner to another, in steps short against the distance of any root.
@@ -96,7 +107,7 @@ std::optional<double> turn(const DelayedSum& function, Complex from, Complex to)
         const Complex next_slope = function.logarithmic_derivative(s);
         if (!(std::abs(next_slope) * step <= 2.0 * longest)) {
             step *= 0.5;
-            if (step < 1e-9 * length)
+            if (step < 1e-12 * length)
                 return std::nullopt;
             continue;
         }
@@ -153,22 +164,24 @@ int count_roots_inside(const DelayedSum& function, const SymmetricRectangle& rec
 }
 
 RootsInside roots_inside(const DelayedSum& function, const SymmetricRectangle& rectangle) {
-    constexpr double resolution = 1e-9; // roots closer than this count as found once at first
-    const ComplexVector starts = start_points(function, rectangle.imag_high);
     ComplexVector found; // all with imaginary part >= 0
-    const auto take = [&](std::optional<Complex> root) {
-        if (!root)
-            return;
-        const double rounding = 1e-13 * std::abs(*root);
-        const Complex upper = std::abs(root->imag()) <= rounding
-                                  ? Complex(root->real())
-                                  : Complex(root->real(), std::abs(root->imag()));
-        if (rectangle.contains(upper))
-            keep_new(found, upper, resolution);
+    // Roots that the rounding of the gain cannot tell apart count as the same one at first.
+    const auto take = [&](Complex root) {
+        const double blur =
+            std::max(1e-12 * std::abs(root), 8.0 * std::abs(function.coarse(root).data));
+        root = std::abs(root.imag()) <= blur ? Complex(root.real())
+                                             : Complex(root.real(), std::abs(root.imag()));
+        const bool known = std::any_of(found.begin(), found.end(), [&](Complex other) {
+            return std::abs(other - root) <= blur;
+        });
+        if (!known && rectangle.contains(root))
+            found.push_back(root);
     };
+    ComplexVector starts = start_points(function, rectangle.imag_high);
     for (const Complex& start : starts)
         if (start.imag() >= -1e-6 * std::abs(start))
-            take(newton(function, start, {}));
+            if (const std::optional<Complex> root = newton(function, start, {}))
+                take(*root);
 
     const auto both_halves = [&found] {
         ComplexVector all;
@@ -181,20 +194,21 @@ RootsInside roots_inside(const DelayedSum& function, const SymmetricRectangle& r
     };
     const int count = count_roots_inside(function, rectangle);
     RootsInside inside{both_halves(), false};
-    // What is missing is looked for with the known roots divided out, from a net of points.
-    constexpr int net = 12;
-    for (int k = 0; k < net * net && count > static_cast<int>(inside.roots.size()); ++k) {
-        const double across = (k % net + 0.5) / net;
-        const double up = (k / net + 0.5) / net;
-        const Complex start(std::lerp(rectangle.real_low, rectangle.real_high, across),
-                            rectangle.imag_high * up * up); // denser towards the real axis
-        std::optional<Complex> root = newton(function, start, inside.roots);
-        if (!root || !rectangle.contains(*root))
-            continue;
-        if (std::abs(root->imag()) <= 1e-7 * std::abs(*root))
-            root = root->real(); // a double root on the axis, as exact as it can be
-        found.emplace_back(root->real(), std::abs(root->imag()));
-        inside.roots = both_halves();
+    if (count > static_cast<int>(inside.roots.size())) {
+        // What is missing is looked for with the known roots divided out; it may be a second root
+        // at the place of one of them.
+        const ComplexVector net = net_points(function, rectangle.imag_high);
+        starts.insert(starts.end(), net.begin(), net.end());
+        for (const Complex& start : starts) {
+            const std::optional<Complex> root = newton(function, start, inside.roots);
+            if (!root || !rectangle.contains(*root))
+                continue;
+            const bool is_real = std::abs(root->imag()) <= 1e-7 * std::abs(*root);
+            found.emplace_back(root->real(), is_real ? 0.0 : std::abs(root->imag()));
+            inside.roots = both_halves();
+            if (count <= static_cast<int>(inside.roots.size()))
+                break;
+        }
     }
     inside.confirmed = count == static_cast<int>(inside.roots.size());
     std::sort(inside.roots.begin(), inside.roots.end(), [](Complex left, Complex right) {
@@ -210,22 +224,25 @@ SymmetricRectangle rightmost_rectangle(const DelayedSum& function, double decay,
     for (const FactorList* list : {&function.sum.left(), &function.sum.right()})
         for (const Complex& root : list->roots)
             largest = std::max(largest, std::abs(root));
-    // Beyond this radius |gain prod(s - right)| exp(decay) stays below |prod(s - left)|.
+    // ln of a bound of |gain prod(s - right)/prod(s - left)| for all |s| >= radius.
     const auto loop_bound = [&](double radius) {
-        double bound = std::log(std::abs(function.sum.gain())) + decay;
+        double bound = std::log(std::abs(function.sum.gain()));
         for (const Complex& root : function.sum.right().roots)
             bound += std::log(radius + std::abs(root));
         for (const Complex& root : function.sum.left().roots)
             bound -= std::log(radius - std::abs(root));
         return bound;
     };
-    double radius = std::max(2.0 * largest, 1.0 / function.delay);
-    constexpr double far = 1e12; // a loop that does not roll off never gets below
-    while (loop_bound(radius) >= 0.0 && radius < far * imag_limit)
-        radius *= 1.5;
-    const double low = -decay / function.delay;
-    const double reach = radius * 1.01;
-    return {low, reach, std::min(reach, imag_limit)};
+    // A root has |loop| = exp(delay * real part): none lies further right than the first radius
+    // below, none right of the low edge further out than the second.
+    const double least = std::max(2.0 * largest, 1.0 / function.delay);
+    double right_reach = least;
+    while (loop_bound(right_reach) >= function.delay * right_reach)
+        right_reach *= 1.5;
+    double reach = least;
+    while (loop_bound(reach) >= -decay && reach < imag_limit)
+        reach *= 1.5;
+    return {-decay / function.delay, 1.01 * right_reach, std::min(1.01 * reach, imag_limit)};
 }
 
 } // namespace cornerwright
