@@ -13,6 +13,18 @@ Candidate refined(const SearchTask& task, const FactoredModel& start) {
     return rated(task, std::move(result.model), result.cost);
 }
 
+/// A few steps first, the rest only where they bring the cost near that of `best`: a model without
+/// a root that the data speak for creeps along far above and is not worth the time.
+Candidate refined_if_near(const SearchTask& task, const FactoredModel& start,
+                          const Candidate& best) {
+    constexpr int first_steps = 8;
+    constexpr double near = 2.0;
+    Refined result = refine(start, task.points, !task.dead_time, first_steps);
+    if (result.cost < near * best.cost)
+        result = refine(result.model, task.points, !task.dead_time, refine_steps);
+    return rated(task, std::move(result.model), result.cost);
+}
+
 /// Without the zero that lies farthest out (its twin as well, if complex).
 std::optional<FactoredModel> without_farthest_zero(const FactoredModel& model) {
     ComplexVector zeros = roots_of(model.zeros);
@@ -37,7 +49,7 @@ Candidate with_fewer_zeros(const SearchTask& task, Candidate best) {
         const auto fewer = without_farthest_zero(model);
         if (!fewer)
             break;
-        Candidate trial = refined(task, *fewer);
+        Candidate trial = refined_if_near(task, *fewer, best);
         model = trial.model;
         ++idle;
         if (trial.criterion <= best.criterion) {
