@@ -1,6 +1,6 @@
 #pragma once
 
-#include "core/loop/loop_figures.h"
+#include "core/loop/loop_assessment.h"
 #include "core/loop/root_locus.h"
 #include "core/realisation/difference_equation.h"
 #include "core/requirements/verdict.h"
@@ -11,13 +11,6 @@
 #include <vector>
 
 namespace cornerwright {
-
-/// Figures and curves of one loop of one case.
-struct LoopAssessment {
-    LoopFigures figures;
-    LoopCurves curves;
-    StepCurves step;
-};
 
 /// What came out for one plant case.
 struct CaseAssessment {

@@ -1,6 +1,6 @@
 #include "core/engine/engine.h"
 
-#include "core/engine/loop_assessment.h"
+#include "core/loop/loop_assessment.h"
 #include "core/numerics/error.h"
 
 #include <utility>

@@ -1,4 +1,4 @@
-#include "core/engine/loop_assessment.h"
+#include "core/loop/loop_assessment.h"
 
 #include "core/loop/closed_loop_poles.h"
 #include "core/loop/frequency_figures.h"

@@ -1,9 +1,18 @@
 #pragma once
 
-#include "core/engine/assessment.h"
 #include "core/loop/loop.h"
+#include "core/loop/loop_figures.h"
+
+#include <string>
 
 namespace cornerwright {
+
+/// Figures and curves of one loop of one case.
+struct LoopAssessment {
+    LoopFigures figures;
+    LoopCurves curves;
+    StepCurves step;
+};
 
 /// Every figure and curve of one loop, from its poles, its frequency response and, where it is
 /// stable, its step.
