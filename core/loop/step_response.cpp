@@ -1,0 +1,68 @@
+#include "core/loop/step_response.h"
+
+#include "core/loop/closed_loop_poles.h"
+#include "core/loop/rational_step.h"
+#include "core/loop/step_drawing.h"
+#include "core/numerics/number_text.h"
+
+namespace cornerwright {
+namespace {
+
+constexpr const char* no_fit = "no fit for this measured case";
+
+/// The model that stands for the plant in time, and what is to be said of it.
+struct TimePlant {
+    const PlantModel* model = nullptr; ///< null: a measurement without a fit
+    std::string note;
+};
+
+TimePlant time_plant(const LoopPlant& plant) {
+    if (const auto* model = std::get_if<PlantModel>(&plant))
+        return {model, {}};
+    const auto& fit = std::get<MeasuredPlant>(plant).fit;
+    if (!fit)
+        return {};
+    constexpr int digits = 2;
+    return {&fit->model, "from the fit, misfit " + number_text(fit->misfit_db, digits) + " dB"};
+}
+
+TimeAssessment without_fit(const FigureRequest& request) {
+    TimeAssessment result{no_time_figures(request, no_fit), {}};
+    result.curves.note = no_fit;
+    return result;
+}
+
+TimeAssessment assessed(const StepSignals& signals, const FigureRequest& request,
+                        const std::string& note) {
+    TimeAssessment result{time_figures(signals, request),
+                          curves_at(signals, drawing_times(signals))};
+    if (!note.empty()) {
+        result.figures = with_note(std::move(result.figures), note);
+        result.curves.note = note;
+    }
+    return result;
+}
+
+} // namespace
+
+TimeAssessment assess_time(const DesignLoop& loop, const FigureRequest& request,
+                           const ComplexVector& closed_loop_poles) {
+    const TimePlant plant = time_plant(loop.plant);
+    if (plant.model == nullptr)
+        return without_fit(request);
+    return assessed(rational_step(loop.compensator, plant.model->roots, closed_loop_poles), request,
+                    plant.note);
+}
+
+StepCurves step_curves(const DesignLoop& loop, double until_s, int points) {
+    const TimePlant plant = time_plant(loop.plant);
+    if (plant.model == nullptr)
+        return {{}, {}, {}, {}, no_fit};
+    const StepSignals signals =
+        rational_step(loop.compensator, plant.model->roots, closed_loop_poles(loop).poles);
+    StepCurves curves = curves_at(signals, even_times(until_s, points));
+    curves.note = plant.note;
+    return curves;
+}
+
+} // namespace cornerwright
