@@ -52,24 +52,30 @@ struct Step {
     std::vector<std::size_t> refused; ///< poles whose next place is not plain
 };
 
-Step try_step(const LocusEquation& equation, const LocusState& from, const std::vector<double>& gap,
-              double to, const LocusStepLimit& limit) {
+/// `before` is the state before `from`, null where the branches turned sharply between the two.
+Step try_step(const LocusEquation& equation, const LocusState* before, const LocusState& from,
+              const std::vector<double>& gap, double to, const LocusStepLimit& limit) {
     constexpr double of_gap = 0.4;
     constexpr double of_move = 0.3;
     Step step{from, 2.0, {}};
     step.state.log_factor = to;
     const double factor = std::exp(to);
+    const double ahead = to - from.log_factor;
+    // Half the change of the rate over the last step, brought to the size of this one.
+    const double bend =
+        before == nullptr ? 0.0 : 0.5 * ahead * ahead / (from.log_factor - before->log_factor);
     for (std::size_t i = 0; i < from.poles.size(); ++i) {
         if (!from.leads(i))
             continue;
         const std::size_t twin = from.mirror[i];
         const bool is_real = twin == i;
-        const Complex predicted = from.poles[i] + (to - from.log_factor) * from.rates[i];
+        Complex predicted = from.poles[i] + ahead * from.rates[i];
+        if (before != nullptr)
+            predicted += bend * (from.rates[i] - before->rates[i]);
         Complex s = is_real ? Complex(predicted.real()) : predicted;
         const double allowed = std::min(of_gap * gap[i], limit.at(from.poles[i]));
-        const double ahead = std::abs(s - from.poles[i]);
         std::optional<LocusEquation::At> at;
-        if (ahead <= 2.0 * allowed)
+        if (std::abs(s - from.poles[i]) <= 2.0 * allowed)
             at = correct(equation, s, is_real, factor,
                          std::min(gap[i], std::abs(from.poles[i]) + limit.smallest));
         const double moved = std::abs(s - from.poles[i]);
@@ -113,9 +119,10 @@ bool iterate_together(const LocusEquation& equation, ComplexVector& poles, doubl
 }
 
 /// The state past a meeting of poles. Two on the real axis leave it and two that come down on it
-/// part along it, each turning left, so that a branch keeps its name through a breakaway.
-LocusState jump(const LocusEquation& equation, const LocusState& from,
-                const std::vector<std::size_t>& refused, double to) {
+/// part along it, each turning left, so that a branch keeps its name through a breakaway. Nothing
+/// where a pole meets one that is not among the followed (dead time).
+std::optional<LocusState> jump(const LocusEquation& equation, const LocusState& from,
+                               const std::vector<std::size_t>& refused, double to) {
     ComplexVector start = from.poles;
     for (std::size_t i = 0; i < start.size(); ++i)
         start[i] += (to - from.log_factor) * from.rates[i];
@@ -139,7 +146,10 @@ LocusState jump(const LocusEquation& equation, const LocusState& from,
         start[other] = centre - left_turn * offset;
     }
     ComplexVector poles = start;
-    if (!iterate_together(equation, poles, std::exp(to)) && !equation.has_delay()) {
+    const bool arrived = iterate_together(equation, poles, std::exp(to));
+    if (!arrived && equation.has_delay())
+        return std::nullopt;
+    if (!arrived) {
         const FactoredSum sum = equation.sum(std::exp(to));
         ComplexVector fresh = sum.start();
         iterate_roots(sum, fresh);
@@ -219,6 +229,7 @@ LocusState locus_state(const LocusEquation& equation, double log_factor, Complex
 std::vector<LocusState> track_locus(const LocusEquation& equation, const LocusState& from,
                                     double to_log_factor, const LocusStepLimit& limit) {
     std::vector<LocusState> states;
+    const LocusState* before = nullptr;
     const LocusState* last = &from;
     const double sign = to_log_factor < from.log_factor ? -1.0 : 1.0;
     double size = 0.02;
@@ -228,19 +239,26 @@ std::vector<LocusState> track_locus(const LocusEquation& equation, const LocusSt
         const double left = std::abs(to_log_factor - last->log_factor);
         const bool arrives = size >= left;
         const double to = arrives ? to_log_factor : last->log_factor + sign * size;
-        Step step = try_step(equation, *last, gap, to, limit);
-        if (!step.refused.empty() && std::min(size, left) > shortest_step) {
-            size = 0.4 * std::min(size, left);
+        Step step = try_step(equation, before, *last, gap, to, limit);
+        if (!step.refused.empty() && std::min(size, left) > 1.01 * shortest_step) {
+            size = std::max(shortest_step, 0.4 * std::min(size, left));
             continue;
         }
         if (step.refused.empty()) {
             states.push_back(std::move(step.state));
-            size = std::min(longest_step, size * std::clamp(step.stretch, 0.3, 2.0));
+            before = last;
+            size =
+                std::clamp(size * std::clamp(step.stretch, 0.3, 2.0), shortest_step, longest_step);
         } else {
             constexpr double past = 8.0; // of the shortest step, well clear of the meeting
             const double beyond = last->log_factor + sign * std::min(left, past * shortest_step);
-            states.push_back(jump(equation, *last, step.refused,
-                                  left <= past * shortest_step ? to_log_factor : beyond));
+            std::optional<LocusState> over =
+                jump(equation, *last, step.refused,
+                     left <= past * shortest_step ? to_log_factor : beyond);
+            if (!over)
+                return states;
+            states.push_back(std::move(*over));
+            before = nullptr;
             size = past * shortest_step;
         }
         last = &states.back();

@@ -29,12 +29,18 @@ ComplexVector landmarks(const RootLocus& locus) {
     return all;
 }
 
-/// The window asked for, or one around the roots of L and the closed-loop poles.
-LocusWindow window_or_default(const RootLocus& locus, const LocusWindow* window) {
+/// The window asked for, or one around the roots of L and the closed-loop poles; with dead time it
+/// reaches to the first links of the chain that this makes, unless all else is far smaller.
+LocusWindow window_or_default(const RootLocus& locus, double delay, const LocusWindow* window) {
     if (window != nullptr)
         return *window;
-    const double reach = 1.3 * reach_of(landmarks(locus));
-    const double half = reach > 0.0 ? reach : 1.0;
+    double reach = reach_of(landmarks(locus));
+    constexpr double first_links = 8.0; // rad of phase over the delay: the first stands near 2 pi
+    constexpr double far_smaller = 20.0;
+    if (delay > 0.0)
+        reach = std::max(reach, reach > 0.0 ? std::min(first_links / delay, far_smaller * reach)
+                                            : first_links / delay);
+    const double half = reach > 0.0 ? 1.3 * reach : 1.0;
     return {-half, half, -half, half};
 }
 
@@ -156,24 +162,24 @@ DelayedStates delayed_states(const LocusEquation& equation, const LocusWindow& w
     constexpr double margin = 0.2;
     const SymmetricRectangle wide = rectangle_around(window, margin);
     // Roots seen at the checkpoints are brought to factor 1, where all branches are put together.
-    const double checkpoints[] = {first, 0.5 * first, 0.0, 0.5 * last, last};
+    const double checkpoints[] = {first, 0.5 * first, 0.5 * last, last};
     ComplexVector at_one = roots_inside(equation.delayed(1.0), wide).roots;
-    for (const double checkpoint : checkpoints) {
-        if (checkpoint == 0.0)
-            continue;
+    const auto bring_in = [&](double checkpoint) {
         const RootsInside inside = roots_inside(equation.delayed(std::exp(checkpoint)), wide);
         const std::vector<LocusState> path =
             track_locus(equation, locus_state(equation, checkpoint, inside.roots), 0.0, limit);
-        if (!path.empty())
+        if (!path.empty() && path.back().log_factor == 0.0)
             add_missing(at_one, path.back().poles);
-    }
-    const LocusState middle = locus_state(equation, 0.0, at_one);
+    };
+    for (const double checkpoint : checkpoints)
+        bring_in(checkpoint);
+    LocusState middle = locus_state(equation, 0.0, at_one);
     std::vector<LocusState> down = track_locus(equation, middle, first, limit);
     std::vector<LocusState> up = track_locus(equation, middle, last, limit);
     DelayedStates result;
     result.states.assign(std::make_move_iterator(down.rbegin()),
                          std::make_move_iterator(down.rend()));
-    result.states.push_back(middle);
+    result.states.push_back(std::move(middle));
     std::move(up.begin(), up.end(), std::back_inserter(result.states));
 
     const SymmetricRectangle shown = rectangle_around(window, 0.0);
@@ -233,7 +239,7 @@ RootLocus root_locus(const DesignLoop& loop, const LocusWindow* window, const Ro
     locus.closed_loop_poles = closed.poles;
     locus.note = model->note;
     const LocusEquation equation(*model);
-    const LocusWindow shown = window_or_default(locus, window);
+    const LocusWindow shown = window_or_default(locus, model->delay_s, window);
     const LocusStepLimit limit = step_limit(locus, shown);
 
     std::vector<LocusState> states;

@@ -44,8 +44,15 @@ ScaledProduct<Number> power_of(const Number& factor, int power) {
 template <typename Number>
 ScaledProduct<Number> product_at(const FactorList& list, const Number& s) {
     ScaledProduct<Number> product{one<Number>(), Number{}};
-    for (const Complex& root : list.roots)
-        product.multiply(difference(s, root));
+    int pending = 0;
+    for (const Complex& root : list.roots) {
+        product.multiply_unchecked(difference(s, root));
+        if (++pending == ScaledProduct<Number>::unchecked) {
+            product.keep_in_range();
+            pending = 0;
+        }
+    }
+    product.keep_in_range();
     if (list.repeated > 0)
         product.multiply(power_of<Number>(difference(s, list.repeated_root), list.repeated));
     return product;

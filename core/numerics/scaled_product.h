@@ -16,8 +16,10 @@ struct ScaledProduct {
     Number derivative;
     int exponent = 0;
 
-    /// Times (s - root) where that is `factor`.
-    void multiply(const Number& factor) {
+    /// Times (s - root) where that is `factor`. After every `unchecked` of these at most,
+    /// keep_in_range is due.
+    static constexpr int unchecked = 8; // numbers of this program's size, 1e-9 to 1e9, each
+    void multiply_unchecked(const Number& factor) {
         if constexpr (std::is_same_v<Number, Complex>) {
             derivative = times(derivative, factor) + value;
             value = times(value, factor);
@@ -25,7 +27,6 @@ struct ScaledProduct {
             derivative = derivative * factor + value;
             value = value * factor;
         }
-        keep_in_range();
     }
 
     /// Times another product.
@@ -39,6 +40,15 @@ struct ScaledProduct {
         }
         exponent += other.exponent;
         keep_in_range();
+    }
+
+    void keep_in_range() {
+        constexpr double large = 0x1p250; // two such numbers and their squares still fit
+        const double largest = std::max(size(value), size(derivative));
+        if (largest > large)
+            scale(-500);
+        else if (largest < 1.0 / large && largest > 0.0)
+            scale(500);
     }
 
     void scale(int shift) {
@@ -59,15 +69,6 @@ struct ScaledProduct {
         return std::max(std::abs(number.real()), std::abs(number.imag()));
     }
     static double size(const PreciseComplex& number) { return size(number.value); }
-
-    void keep_in_range() {
-        constexpr double large = 0x1p250; // two such numbers and their squares still fit
-        const double largest = std::max(size(value), size(derivative));
-        if (largest > large)
-            scale(-500);
-        else if (largest < 1.0 / large && largest > 0.0)
-            scale(500);
-    }
 };
 
 } // namespace cornerwright
