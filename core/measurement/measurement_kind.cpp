@@ -1,6 +1,8 @@
 #include "core/measurement/measurement_kind.h"
 
 #include "core/measurement/number_field.h"
+#include "core/measurement/read_touchstone.h"
+#include "core/measurement/read_universal_file.h"
 #include "core/measurement/text_lines.h"
 
 #include <algorithm>
@@ -61,13 +63,14 @@ Preview::Kind measurement_kind(ByteSource& source, const std::string& file_name)
 
 ReadResult read_any_kind(ByteSource& source, const std::string& file_name,
                          const ReadOptions& options, TableReport& report) {
-    switch (measurement_kind(source, file_name)) {
-    case Preview::Kind::touchstone:
-    case Preview::Kind::universal_file:
-    case Preview::Kind::text_table:
-        break;
-    }
-    TextLines lines(source, file_name, options.progress);
+    const Preview::Kind kind = measurement_kind(source, file_name);
+    const auto binary = kind == Preview::Kind::universal_file ? TextLines::Binary::remember
+                                                              : TextLines::Binary::refuse;
+    TextLines lines(source, file_name, options.progress, binary);
+    if (kind == Preview::Kind::touchstone)
+        return read_touchstone(lines, options);
+    if (kind == Preview::Kind::universal_file)
+        return read_universal_file(lines);
     return read_table(lines, options, report);
 }
 

@@ -14,11 +14,7 @@ ReadResult read_source(ByteSource& source, const std::string& file_name,
     try {
         TableReport report;
         ReadResult result = read_any_kind(source, file_name, options, report);
-        if (options.flip_sign)
-            result.response = with_sign_flipped(std::move(result.response));
-        if (options.remove_delay_s != 0.0)
-            result.response =
-                with_delay_removed(std::move(result.response), options.remove_delay_s);
+        result.response = edited(std::move(result.response), options);
         return result;
     } catch (const ReadingCancelled&) {
         ReadResult cancelled;

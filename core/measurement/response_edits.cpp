@@ -4,6 +4,7 @@
 
 #include <cmath>
 #include <complex>
+#include <utility>
 
 namespace cornerwright {
 namespace {
@@ -39,6 +40,14 @@ MeasuredResponse with_delay_removed(MeasuredResponse measured, double delay_s) {
         const double angle = measured.w_rad_s[i] * delay_s;
         measured.response[i] *= Complex{std::cos(angle), std::sin(angle)};
     }
+    return measured;
+}
+
+MeasuredResponse edited(MeasuredResponse measured, const ReadOptions& options) {
+    if (options.flip_sign)
+        measured = with_sign_flipped(std::move(measured));
+    if (options.remove_delay_s != 0.0)
+        measured = with_delay_removed(std::move(measured), options.remove_delay_s);
     return measured;
 }
 

@@ -1,6 +1,6 @@
 #pragma once
 
-#include "core/response/measured_response.h"
+#include "core/measurement/read_measurement.h"
 
 #include <span>
 
@@ -11,6 +11,9 @@ MeasuredResponse with_sign_flipped(MeasuredResponse measured);
 
 /// The response without a known delay: multiplied by exp(+jw delay).
 MeasuredResponse with_delay_removed(MeasuredResponse measured, double delay_s);
+
+/// Sign and delay as the options say.
+MeasuredResponse edited(MeasuredResponse measured, const ReadOptions& options);
 
 /// P = L/C from a measured loop gain L and the compensator's response at the same frequencies.
 /// Throws InputError where the numbers of points differ, or C is zero or not finite somewhere.
