@@ -77,6 +77,33 @@ class CountingIterator {
     const char** reached_;
 };
 
+struct Complaint {
+    std::string expected = "valid JSON";
+    std::string found;
+};
+
+/// Takes the library's sentence apart: "[...] ... at line 1, column 3: syntax error while parsing
+/// object - unexpected ','; expected string literal".
+Complaint parts_of(std::string_view sentence) {
+    for (const std::string_view lead : {"] ", " - "})
+        if (const auto end = sentence.find(lead); end != std::string_view::npos)
+            sentence.remove_prefix(end + lead.size());
+    Complaint complaint;
+    while (!sentence.empty()) {
+        const std::string_view part = sentence.substr(0, sentence.find("; "));
+        sentence.remove_prefix(std::min(part.size() + 2, sentence.size()));
+        if (part.starts_with("expected "))
+            complaint.expected = part.substr(part.find(' ') + 1);
+        else if (part.starts_with("unexpected "))
+            complaint.found = part.substr(part.find(' ') + 1);
+        else if (part.starts_with("last read: "))
+            complaint.found += " at " + std::string(part.substr(part.find(": ") + 2));
+        else
+            complaint.found = part;
+    }
+    return complaint;
+}
+
 /// Builds the tree from the parser's events. The parser reads one character too many only behind a
 /// number, so the place of every token follows from how far it has read.
 class TreeBuilder : public nlohmann::json_sax<nlohmann::json> {
@@ -121,24 +148,7 @@ class TreeBuilder : public nlohmann::json_sax<nlohmann::json> {
     bool parse_error(std::size_t position, const std::string&,
                      const nlohmann::detail::exception& error) override {
         const Place place = places_.at(position == 0 ? 0 : position - 1);
-        std::string expected = "valid JSON";
-        std::string found;
-        std::string_view rest = error.what();
-        const auto detail = rest.find(" - ");
-        rest.remove_prefix(detail == std::string_view::npos ? rest.find(": ") + 2 : detail + 3);
-        for (std::size_t end = 0; end != std::string_view::npos;
-             rest.remove_prefix(std::min(end, rest.size() - 2) + 2)) {
-            end = rest.find("; ");
-            const std::string_view part = rest.substr(0, end);
-            if (part.starts_with("expected "))
-                expected = part.substr(9);
-            else if (part.starts_with("unexpected "))
-                found = part.substr(11);
-            else if (!part.starts_with("last read") && found.empty())
-                found = part;
-            if (end == std::string_view::npos)
-                break;
-        }
+        const auto [expected, found] = parts_of(error.what());
         throw InputError({file_, place.line, place.column}, expected, found);
     }
 

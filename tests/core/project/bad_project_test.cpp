@@ -42,20 +42,20 @@ TEST_P(BadProject, IsRefusedWithPlaceAndSentence) {
 
 constexpr Bad json_errors[]{
     {"Empty", "", 1, 1, "literal", "end of input"},
-    {"NoJson", "hello", 1, 1, "literal", "invalid literal"},
+    {"NoJson", "hello", 1, 1, "valid JSON", "invalid literal at 'h'"},
     {"MissingComma", "{\"cornerwright\": 1\n \"title\": \"a\"}", 2, 8, "'}'", "string literal"},
     {"Truncated", "{\"cornerwright\": 1,\n\"title\": ", 2, 10, "literal", "end of input"},
     {"TrailingText", "{\"cornerwright\": 1} x", 1, 21, "end of input", "invalid literal"},
     {"KeyTwice", "{\"cornerwright\": 1,\n  \"title\": \"a\", \"title\": \"b\"}", 2, 17,
      "every key once", "\"title\" a second time"},
     {"NumberTooLarge",
-     "{\"cornerwright\": 1, \"compensator\": [{\"kind\": \"gain\", \"gain\": 1e999}]}", 1, 67,
+     "{\"cornerwright\": 1, \"compensator\": [{\"kind\": \"gain\", \"gain\": 1e999}]}", 1, 66,
      "JSON", "1e999"},
     {"NotANumber", "{\"cornerwright\": NaN}", 1, 18, "", "invalid literal"},
     {"NotAnObject", "[1]", 1, 1, "a project", "a list"},
 };
 INSTANTIATE_TEST_SUITE_P(Json, BadProject, testing::ValuesIn(json_errors),
-                         [](const auto& info) { return std::string(info.param.name); });
+                         [](const auto& chosen) { return std::string(chosen.param.name); });
 
 constexpr Bad key_errors[]{
     {"NoVersion", "{\"title\": \"a\"}", 1, 1, "\"cornerwright\"", "none"},
@@ -86,7 +86,7 @@ constexpr Bad key_errors[]{
      1, 66, "\"gain\"", "\"corner_rad_s\""},
 };
 INSTANTIATE_TEST_SUITE_P(Keys, BadProject, testing::ValuesIn(key_errors),
-                         [](const auto& info) { return std::string(info.param.name); });
+                         [](const auto& chosen) { return std::string(chosen.param.name); });
 
 #define IN_CASES(text) "{\"cornerwright\": 1, \"plant_cases\": [\n" text "]}"
 constexpr Bad plant_errors[]{
@@ -117,7 +117,7 @@ constexpr Bad plant_errors[]{
     {"NegativeDeadTime",
      IN_CASES("{\"name\": \"a\", \"model\": {\"poles_rad_s\": [[0, 0]], \"gain\": 1, "
               "\"dead_time_s\": -1}}"),
-     2, 75, "zero or above for \"dead_time_s\"", "-1"},
+     2, 76, "zero or above for \"dead_time_s\"", "-1"},
     {"IntegratorsOfModel", IN_CASES("{\"name\": \"a\", \"formula\": \"1/s\", \"integrators\": 1}"),
      2, 33, "in plant case 1", "\"integrators\""},
     {"MissingMeasurement",
@@ -128,7 +128,7 @@ constexpr Bad plant_errors[]{
      58, "64 lower-case", "\"12\""},
 };
 INSTANTIATE_TEST_SUITE_P(Plants, BadProject, testing::ValuesIn(plant_errors),
-                         [](const auto& info) { return std::string(info.param.name); });
+                         [](const auto& chosen) { return std::string(chosen.param.name); });
 
 #define IN_CHAIN(text) "{\"cornerwright\": 1, \"compensator\": [\n" text "]}"
 #define IN_LIST(text) "{\"cornerwright\": 1, \"requirements\": [\n" text "]}"
@@ -164,17 +164,17 @@ constexpr Bad value_errors[]{
     {"WordBits",
      IN_REALISATION("\"method\": \"tustin\", \"number_format\": {\"type\": \"fixed\", "
                     "\"word_bits\": 24, \"fraction_bits\": 8}"),
-     2, 74, "16 or 32", "24"},
+     2, 70, "16 or 32", "24"},
     {"FractionBits",
      IN_REALISATION("\"method\": \"tustin\", \"number_format\": {\"type\": \"fixed\", "
                     "\"word_bits\": 16, \"fraction_bits\": 16}"),
-     2, 95, "from 0 to 15", "16"},
+     2, 91, "from 0 to 15", "16"},
     {"LimitsOfOutput",
      IN_REALISATION("\"method\": \"tustin\", \"output_limits\": {\"at_least\": 2, \"at_most\": 2}"),
-     2, 40, "\"at_least\" below \"at_most\"", "equal"},
+     2, 39, "\"at_least\" below \"at_most\"", "equal"},
 };
 INSTANTIATE_TEST_SUITE_P(Values, BadProject, testing::ValuesIn(value_errors),
-                         [](const auto& info) { return std::string(info.param.name); });
+                         [](const auto& chosen) { return std::string(chosen.param.name); });
 
 TEST(BadProjectFile, DeepNestingIsRefused) {
     EXPECT_THROW(parse_project(std::string(100'000, '['), "p", "."), InputError);

@@ -142,29 +142,19 @@ TEST(ProjectFile, ReadsEveryDocumentedKey) {
     const std::string csv =
         "frequency_hz,magnitude_db,phase_deg\n1,-3,-90\n2,-9,-100\n3,-12,-120\n";
     folder.write("measurements/unit7.csv", csv);
-    const std::string text = R"({
+    const std::string text = R"json({
   "cornerwright": 1, "title": "Seedling gantry", "notes": "free text",
   "plant_cases": [
-    {"name": "empty tray", "formula": "42 exp(-0.0008 s) / (s (s/31 + 1))"
-}
-, {
-    "name" : "half load",
-    "model" : {
-        "zeros_rad_s" : [ [ -120, 900 ], [ -120, -900 ] ],
-        "poles_rad_s" : [ [ 0, 0 ], [ -28, 0 ], [ -15, 780 ], [ -15, -780 ] ],
-        "gain" : 1170.0,
-        "dead_time_s" : 0.0008
-    }
-},
-    {
-        "name" : "bench unit",
-        "model" : {"numerator" : [18.0], "denominator" : [ 0.2, 1.0, 0.0 ], "dead_time_s" : 0.0}
-    },
-{
-    "name" : "unit 7", "measurement" : {
-        "file" : "measurements/unit7.csv",
-                 "sha256" : ")" + sha256_hex(csv) + R"("}, "integrators": 1, "unstable_poles": 0,
-     "fit": {"zeros_rad_s": [], "poles_rad_s": [], "gain": 1.0, "dead_time_s": 0.0, "misfit_db": 0.4}}],
+    {"name": "empty tray", "formula": "42 exp(-0.0008 s) / (s (s/31 + 1))"},
+    {"name": "half load", "model": {"zeros_rad_s": [[-120, 900], [-120, -900]],
+     "poles_rad_s": [[0, 0], [-28, 0], [-15, 780], [-15, -780]], "gain": 1170.0,
+     "dead_time_s": 0.0008}},
+    {"name": "bench unit", "model": {"numerator": [18.0], "denominator": [0.2, 1.0, 0.0],
+     "dead_time_s": 0.0}},
+    {"name": "unit 7", "measurement": {"file": "measurements/unit7.csv", "sha256": ")json" +
+                             sha256_hex(csv) + R"json("}, "integrators": 1, "unstable_poles": 0,
+     "fit": {"zeros_rad_s": [], "poles_rad_s": [], "gain": 1.0, "dead_time_s": 0.0,
+     "misfit_db": 0.4}}],
   "compensator": [
     {"kind": "gain", "gain": 12.0}, {"kind": "integrator"}, {"kind": "pi", "corner_rad_s": 3.0},
     {"kind": "lead", "zero_rad_s": 20.0, "pole_rad_s": 100.0, "label": "phase lift", "enabled": true, "locked": false},
@@ -182,86 +172,85 @@ TEST(ProjectFile, ReadsEveryDocumentedKey) {
     {"measure": "steady_state_error", "input": "ramp", "at_most": 0.05},
     {"measure": "disturbance_rejection", "up_to_rad_s": 6.0, "at_most_db": -20.0},
     {"measure": "roll_off", "from_rad_s": 600, "at_most_db": -20.0}]
-})";
-        const LoadedProject loaded = parse_project(text, "p", folder.path());
-        EXPECT_THAT(loaded.notices, IsEmpty());
-        const Project& project = loaded.project;
-        ASSERT_EQ(project.plant_cases.size(), 4U);
-        const auto& measured = std::get<MeasurementSource>(project.plant_cases[3].source);
-        ASSERT_TRUE(measured.response);
-        EXPECT_EQ(measured.response->w_rad_s.size(), 3U);
-        EXPECT_EQ(measured.integrators, 1);
-        ASSERT_TRUE(measured.fit);
-        EXPECT_EQ(measured.fit->misfit_db, 0.4);
-        ASSERT_EQ(project.compensator.size(), 11U);
-        EXPECT_EQ(project.compensator[3].label, "phase lift");
-        EXPECT_EQ(project.sampling, (Sampling{0.0005, 0.00025, true}));
-        ASSERT_TRUE(project.realisation);
-        EXPECT_EQ(project.realisation->number_format.fraction_bits, 28);
-        ASSERT_EQ(project.requirements.size(), 5U);
-        EXPECT_EQ(project.requirements[1].band_percent, 5.0);
-        EXPECT_EQ(project.requirements[2].input, ErrorInput::ramp);
-        EXPECT_EQ(parse_project(to_text(project), "p", folder.path()).project, project);
-    }
+})json";
+    const LoadedProject loaded = parse_project(text, "p", folder.path());
+    EXPECT_THAT(loaded.notices, IsEmpty());
+    const Project& project = loaded.project;
+    ASSERT_EQ(project.plant_cases.size(), 4U);
+    const auto& measured = std::get<MeasurementSource>(project.plant_cases[3].source);
+    ASSERT_TRUE(measured.response);
+    EXPECT_EQ(measured.response->w_rad_s.size(), 3U);
+    EXPECT_EQ(measured.integrators, 1);
+    ASSERT_TRUE(measured.fit);
+    EXPECT_EQ(measured.fit->misfit_db, 0.4);
+    ASSERT_EQ(project.compensator.size(), 11U);
+    EXPECT_EQ(project.compensator[3].label, "phase lift");
+    EXPECT_EQ(project.sampling, (Sampling{0.0005, 0.00025, true}));
+    ASSERT_TRUE(project.realisation);
+    EXPECT_EQ(project.realisation->number_format.fraction_bits, 28);
+    ASSERT_EQ(project.requirements.size(), 5U);
+    EXPECT_EQ(project.requirements[1].band_percent, 5.0);
+    EXPECT_EQ(project.requirements[2].input, ErrorInput::ramp);
+    EXPECT_EQ(parse_project(to_text(project), "p", folder.path()).project, project);
+}
 
-    TEST(ProjectFile, AChangedMeasurementIsTold) {
-        const TemporaryFolder folder;
-        folder.write("a.csv", "frequency_hz,magnitude_db,phase_deg\n1,-3,-90\n2,-9,-100\n");
-        const std::string text =
-            R"({"cornerwright": 1, "plant_cases": [{"name": "unit", "measurement":
+TEST(ProjectFile, AChangedMeasurementIsTold) {
+    const TemporaryFolder folder;
+    folder.write("a.csv", "frequency_hz,magnitude_db,phase_deg\n1,-3,-90\n2,-9,-100\n");
+    const std::string text =
+        R"({"cornerwright": 1, "plant_cases": [{"name": "unit", "measurement":
         {"file": "a.csv", "sha256": ")" +
-            std::string(64, '0') + R"("}}]})";
-        const LoadedProject loaded = parse_project(text, "p", folder.path());
-        EXPECT_THAT(loaded.notices, ElementsAre(HasSubstr("\"a.csv\" has changed")));
-        const auto& source = std::get<MeasurementSource>(loaded.project.plant_cases[0].source);
-        EXPECT_TRUE(source.response);
-        EXPECT_EQ(source.sha256, std::string(64, '0')) << "the pin is the user's to renew";
-    }
+        std::string(64, '0') + R"("}}]})";
+    const LoadedProject loaded = parse_project(text, "p", folder.path());
+    EXPECT_THAT(loaded.notices, ElementsAre(HasSubstr("\"a.csv\" has changed")));
+    const auto& source = std::get<MeasurementSource>(loaded.project.plant_cases[0].source);
+    EXPECT_TRUE(source.response);
+    EXPECT_EQ(source.sha256, std::string(64, '0')) << "the pin is the user's to renew";
+}
 
-    TEST(ProjectFile, AMissingMeasurementKeepsItsPlaceWhereThatIsWanted) {
-        const std::string text =
-            R"({"cornerwright": 1, "plant_cases": [{"name": "unit", "measurement":
+TEST(ProjectFile, AMissingMeasurementKeepsItsPlaceWhereThatIsWanted) {
+    const std::string text =
+        R"({"cornerwright": 1, "plant_cases": [{"name": "unit", "measurement":
         {"file": "gone.csv"}, "integrators": 2}]})";
-        EXPECT_THROW(parse_project(text, "p", "."), InputError);
-        const LoadedProject loaded = parse_project(text, "p", ".", MissingFiles::are_notices);
-        EXPECT_THAT(loaded.notices, ElementsAre(HasSubstr("gone.csv")));
-        const auto& source = std::get<MeasurementSource>(loaded.project.plant_cases[0].source);
-        EXPECT_FALSE(source.response);
-        EXPECT_EQ(source.integrators, 2);
-        EXPECT_THAT(to_text(loaded.project), HasSubstr("gone.csv"));
-    }
+    EXPECT_THROW(parse_project(text, "p", "."), InputError);
+    const LoadedProject loaded = parse_project(text, "p", ".", MissingFiles::are_notices);
+    EXPECT_THAT(loaded.notices, ElementsAre(HasSubstr("gone.csv")));
+    const auto& source = std::get<MeasurementSource>(loaded.project.plant_cases[0].source);
+    EXPECT_FALSE(source.response);
+    EXPECT_EQ(source.integrators, 2);
+    EXPECT_THAT(to_text(loaded.project), HasSubstr("gone.csv"));
+}
 
-    TEST(ProjectFile, AnErrorInAMeasurementNamesThatFile) {
-        const TemporaryFolder folder;
-        folder.write("a.csv",
-                     "frequency_hz,magnitude_db,phase_deg\n1,-3,-90\n2,minus three,-100\n");
-        const std::string text =
-            R"({"cornerwright": 1, "plant_cases": [{"name": "unit", "measurement":
+TEST(ProjectFile, AnErrorInAMeasurementNamesThatFile) {
+    const TemporaryFolder folder;
+    folder.write("a.csv", "frequency_hz,magnitude_db,phase_deg\n1,-3,-90\n2,minus three,-100\n");
+    const std::string text =
+        R"({"cornerwright": 1, "plant_cases": [{"name": "unit", "measurement":
         {"file": "a.csv"}}]})";
-        try {
-            parse_project(text, "p", folder.path());
-            FAIL();
-        } catch (const InputError& error) {
-            EXPECT_THAT(error.what(), HasSubstr("a.csv, line 3, column 2"));
-            EXPECT_THAT(error.what(), HasSubstr("minus three"));
-        }
+    try {
+        parse_project(text, "p", folder.path());
+        FAIL();
+    } catch (const InputError& error) {
+        EXPECT_THAT(error.what(), HasSubstr("a.csv, line 3, column 2"));
+        EXPECT_THAT(error.what(), HasSubstr("minus three"));
     }
+}
 
-    TEST(ProjectFile, NumbersAreWrittenInTheirShortestForm) {
-        Project project;
-        Section gain;
-        gain.gain = 0.1;
-        project.compensator = {gain};
-        EXPECT_THAT(to_text(project), HasSubstr("{\"kind\": \"gain\", \"gain\": 0.1}"));
-    }
+TEST(ProjectFile, NumbersAreWrittenInTheirShortestForm) {
+    Project project;
+    Section gain;
+    gain.gain = 0.1;
+    project.compensator = {gain};
+    EXPECT_THAT(to_text(project), HasSubstr("{\"kind\": \"gain\", \"gain\": 0.1}"));
+}
 
-    TEST(ProjectFile, SavesAndLoads) {
-        const TemporaryFolder folder;
-        const auto file = folder.path() / "axis.cornerwright.json";
-        const Project project = RandomProject(3).make();
-        save_project(project, file);
-        EXPECT_EQ(load_project(file).project, project);
-    }
+TEST(ProjectFile, SavesAndLoads) {
+    const TemporaryFolder folder;
+    const auto file = folder.path() / "axis.cornerwright.json";
+    const Project project = RandomProject(3).make();
+    save_project(project, file);
+    EXPECT_EQ(load_project(file).project, project);
+}
 
 } // namespace
 } // namespace cornerwright
