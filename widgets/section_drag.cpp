@@ -14,9 +14,10 @@ constexpr double deepest_notch_db = -80.0;
 constexpr double shallowest_notch_db = -0.1;
 constexpr double smallest_corner = 1e-9;
 constexpr double largest_corner = 1e12;
-/// The upper corner must stay above the lower one by the least ratio, in a lead the pole.
-constexpr double dampingOfAngle(double real, double modulus) {
-    return -real / modulus;
+
+/// Damping of a root: the cosine of its angle from the negative real axis.
+double dampingOf(std::complex<double> root) {
+    return -root.real() / std::max(std::abs(root), smallest_corner);
 }
 
 bool hasTwoCorners(const Section& section) {
@@ -133,6 +134,34 @@ Section withDampingFactor(Section section, double factor) {
     return section;
 }
 
+Section withResponseDrag(const Section& section, SectionPart part, const ResponseDrag& drag) {
+    const double up = std::pow(10.0, drag.up_db / 20.0);
+    if (section.kind == SectionKind::notch && drag.width)
+        return withWidthFactor(section, drag.frequency_factor);
+    const auto corners = cornersOf(section);
+    const auto corner = std::find_if(corners.begin(), corners.end(),
+                                     [&](const SectionCorner& c) { return c.part == part; });
+    const double at = part == SectionPart::grip ? characteristic_rad_s(section)
+                      : corner != corners.end() ? corner->w_rad_s
+                                                : section.corner_rad_s;
+    const Section moved = withCornerAt(section, part, at * drag.frequency_factor);
+    if (drag.up_db == 0.0)
+        return moved;
+    if (part == SectionPart::grip)
+        return withRatio(moved, ratioOf(moved) * up);
+    switch (section.kind) {
+    case SectionKind::notch:
+        // From an endlessly deep notch the hand starts at the deepest that a drag reaches.
+        return withDepth(moved, std::max(depthOf(section), deepest_notch_db) + drag.up_db);
+    case SectionKind::complex_poles:
+        return withDampingFactor(moved, 1.0 / up);
+    case SectionKind::complex_zeros:
+        return withDampingFactor(moved, up);
+    default:
+        return moved;
+    }
+}
+
 std::vector<SectionRoot> draggableRootsOf(const Section& section) {
     const double w = section.corner_rad_s;
     switch (section.kind) {
@@ -164,7 +193,7 @@ std::vector<SectionRoot> draggableRootsOf(const Section& section) {
 
 Section withRootAt(Section section, const SectionRoot& root, std::complex<double> s) {
     const double modulus = std::max(std::abs(s), smallest_corner);
-    const double damping = std::max(dampingOfAngle(s.real(), modulus), 0.0);
+    const double damping = std::max(dampingOf(s), 0.0);
     switch (section.kind) {
     case SectionKind::complex_zeros:
         section.corner_rad_s = modulus;

@@ -53,6 +53,19 @@ Section withWidthFactor(Section section, double factor);
 /// Complex zeros and poles: the damping by `factor`.
 Section withDampingFactor(Section section, double factor);
 
+/// A hand's wish on a frequency response: sideways as a factor on the frequency, upwards in
+/// decibel.
+struct ResponseDrag {
+    double frequency_factor = 1.0;
+    double up_db = 0.0;
+    bool width = false; ///< notch: width instead of centre and depth
+};
+
+/// The part moved from where it stands in `section`. Sideways moves the corner (grip: both).
+/// Upwards opens lead and lag by their grip, makes a notch shallower and the resonance of a complex
+/// pair sharper (poles) or duller (zeros); real corners follow sideways only.
+Section withResponseDrag(const Section& section, SectionPart part, const ResponseDrag& drag);
+
 /// Every root of the section that can be dragged in the s-plane (those right of the real axis and
 /// their twins move together). `root` has imag >= 0.
 struct SectionRoot {

@@ -1,0 +1,120 @@
+#include "widgets/panes/painting.h"
+
+#include <QFontMetricsF>
+
+#include <algorithm>
+#include <cmath>
+
+namespace cornerwright {
+
+namespace {
+
+/// Far outside every screen; the rasteriser loses its speed and its bits with greater numbers.
+constexpr double farthest_pixel = 20000.0;
+
+} // namespace
+
+QPen curvePen(const QColor& colour, double width, Qt::PenStyle style) {
+    QPen pen(colour, width);
+    if (style == Qt::DashLine)
+        pen.setDashPattern({5.0, 4.0});
+    else if (style == Qt::DotLine)
+        pen.setDashPattern({1.0, 3.0});
+    else
+        pen.setStyle(style);
+    pen.setCapStyle(Qt::FlatCap);
+    pen.setJoinStyle(Qt::BevelJoin);
+    return pen;
+}
+
+void drawFunction(QPainter& painter, const QPen& pen, std::span<const double> x,
+                  std::span<const double> y, const AxisMap& mapX, const AxisMap& mapY) {
+    if (x.size() != y.size() || x.size() < 2)
+        return;
+    // One point beyond either side, so that the line runs to the edge.
+    const auto first = std::lower_bound(x.begin(), x.end(), mapX.range().low);
+    const auto last = std::upper_bound(x.begin(), x.end(), mapX.range().high);
+    const auto from = static_cast<std::size_t>(first == x.begin() ? 0 : first - x.begin() - 1);
+    const auto to = std::min(x.size(), static_cast<std::size_t>(last - x.begin()) + 1);
+    std::vector<QPointF> pixels;
+    pixels.reserve(to - from);
+    for (std::size_t i = from; i < to; ++i)
+        pixels.emplace_back(mapX.toPixel(x[i]),
+                            std::clamp(mapY.toPixel(y[i]), -farthest_pixel, farthest_pixel));
+    painter.setPen(pen);
+    for (const QPolygonF& line : thinnedToColumns(pixels))
+        painter.drawPolyline(line);
+}
+
+void drawPath(QPainter& painter, const QPen& pen, std::span<const QPointF> pixels,
+              const QRectF& area) {
+    painter.setPen(pen);
+    constexpr double beyond_edge = 20.0;
+    const QRectF clip = area.adjusted(-beyond_edge, -beyond_edge, beyond_edge, beyond_edge);
+    for (const QPolygonF& line : thinnedInPlane(pixels, clip))
+        painter.drawPolyline(line);
+}
+
+void drawTriangle(QPainter& painter, const QPointF& at, double size, bool up, const QColor& fill,
+                  const QColor& line) {
+    const double tip = up ? -size : size;
+    const QPointF corners[] = {at + QPointF(0.0, tip), at + QPointF(-1.1 * size, -0.7 * tip),
+                               at + QPointF(1.1 * size, -0.7 * tip)};
+    painter.setPen(QPen(line, 1.0));
+    painter.setBrush(fill);
+    painter.drawPolygon(corners, 3);
+}
+
+QRectF LabelPlacer::place(const QSizeF& size, std::initializer_list<QPointF> wishes) {
+    const auto inside = [&](QRectF area) {
+        area.moveLeft(std::clamp(area.left(), bounds_.left(),
+                                 std::max(bounds_.left(), bounds_.right() - size.width())));
+        area.moveTop(std::clamp(area.top(), bounds_.top(),
+                                std::max(bounds_.top(), bounds_.bottom() - size.height())));
+        return area;
+    };
+    const auto isFree = [&](const QRectF& area) {
+        return std::none_of(taken_.begin(), taken_.end(),
+                            [&](const QRectF& other) { return other.intersects(area); });
+    };
+    QRectF best = inside(QRectF(*wishes.begin(), size));
+    for (const QPointF& wish : wishes) {
+        const QRectF area = inside(QRectF(wish, size));
+        if (isFree(area)) {
+            best = area;
+            break;
+        }
+    }
+    taken_.push_back(best);
+    return best;
+}
+
+QSizeF labelSize(const QString& text, const QFont& font) {
+    const QFontMetricsF metrics(font);
+    return {metrics.horizontalAdvance(text) + 10.0, metrics.height() + 4.0};
+}
+
+void drawLabel(QPainter& painter, const QRectF& area, const QString& text, const LabelStyle& style,
+               const Theme& theme) {
+    if (style.ground != LabelGround::none) {
+        QColor ground = theme.colour(ColourRole::pane);
+        QPen border(Qt::NoPen);
+        if (style.ground == LabelGround::tinted) {
+            border = QPen(style.colour, 1.0);
+        } else {
+            ground.setAlphaF(0.86F);
+        }
+        painter.setPen(border);
+        painter.setBrush(ground);
+        painter.drawRoundedRect(area, 4.0, 4.0);
+    }
+    painter.setFont(style.font);
+    painter.setPen(style.colour);
+    painter.drawText(area, Qt::AlignCenter, text);
+}
+
+double handleSize() {
+    return std::max(6.0, 0.45 * QFontMetricsF(fontOf(FontRole::body)).height());
+}
+
+} // namespace cornerwright

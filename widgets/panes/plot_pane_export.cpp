@@ -1,0 +1,88 @@
+// The commands of a plot pane that carry it out of the window: clipboard and files.
+
+#include "widgets/panes/plot_pane.h"
+
+#include <QAction>
+#include <QClipboard>
+#include <QFileDialog>
+#include <QFileInfo>
+#include <QGuiApplication>
+#include <QMessageBox>
+#include <QSaveFile>
+
+namespace cornerwright {
+
+namespace {
+
+void tellNotSaved(QWidget* parent, const QString& file) {
+    QMessageBox::warning(parent, PlotPane::tr("Not saved"),
+                         PlotPane::tr("%1 could not be written.").arg(file));
+}
+
+} // namespace
+
+QAction* PlotPane::addPaneAction(const QString& text, const std::function<void()>& run) {
+    auto* action = new QAction(text, this);
+    connect(action, &QAction::triggered, this, run);
+    addAction(action);
+    return action;
+}
+
+void PlotPane::addExportActions() {
+    addPaneAction(tr("Show all"), [this] { fit(); });
+    addPaneAction(tr("Copy as picture"), [this] { copyPicture(); });
+    addPaneAction(tr("Save picture …"), [this] { askAndSavePicture(); });
+    addPaneAction(tr("Save data as CSV …"), [this] { askAndSaveData(); });
+}
+
+QImage PlotPane::picture(double scale) {
+    exporting_ = true;
+    canvas_.setTheme(theme());
+    QImage image = canvas_.picture(scale);
+    exporting_ = false;
+    canvas_.setTheme(theme());
+    redraw();
+    return image;
+}
+
+bool PlotPane::savePicture(const QString& file) {
+    const QString suffix = QFileInfo(file).suffix().toLower();
+    const bool isVector = suffix == QLatin1String("pdf") || suffix == QLatin1String("svg");
+    if (!isVector)
+        return picture().save(file, "PNG");
+    exporting_ = true;
+    canvas_.setTheme(theme());
+    const bool saved = canvas_.saveVector(file, suffix == QLatin1String("svg"));
+    exporting_ = false;
+    canvas_.setTheme(theme());
+    redraw();
+    return saved;
+}
+
+void PlotPane::copyPicture() {
+    QGuiApplication::clipboard()->setImage(picture());
+}
+
+void PlotPane::askAndSavePicture() {
+    const QString file = QFileDialog::getSaveFileName(this, tr("Save picture of %1").arg(title()),
+                                                      title().toLower() + QStringLiteral(".pdf"),
+                                                      tr("PDF (*.pdf);;SVG (*.svg);;PNG (*.png)"));
+    if (!file.isEmpty() && !savePicture(file))
+        tellNotSaved(this, file);
+}
+
+void PlotPane::askAndSaveData() {
+    const QString file = QFileDialog::getSaveFileName(this, tr("Save data of %1").arg(title()),
+                                                      title().toLower() + QStringLiteral(".csv"),
+                                                      tr("Comma-separated values (*.csv)"));
+    if (file.isEmpty())
+        return;
+    QSaveFile target(file);
+    const QByteArray text = csv().toUtf8();
+    const bool saved =
+        target.open(QIODevice::WriteOnly) && target.write(text) == text.size() && target.commit();
+    if (!saved)
+        tellNotSaved(this, file);
+}
+
+} // namespace cornerwright
