@@ -18,7 +18,7 @@ struct ScaledProduct {
 
     /// Times (s - root) where that is `factor`. After every `unchecked` of these at most,
     /// keep_in_range is due.
-    static constexpr int unchecked = 8; // numbers of this program's size, 1e-9 to 1e9, each
+    static constexpr int unchecked = 4; // of sizes between 1e-45 and 1e45
     void multiply_unchecked(const Number& factor) {
         if constexpr (std::is_same_v<Number, Complex>) {
             derivative = times(derivative, factor) + value;
