@@ -57,6 +57,9 @@ FigureRequest request_of(std::span<const Requirement> requirements);
 Verdict judge(std::span<const Requirement> requirements, const FigureRequest& request,
               std::span<const JudgedLoop> loops);
 
+/// The share of the nearer limit for a value judged by size, without a loop around it.
+Figure share_of(const Requirement& requirement, double size);
+
 /// "at least 45 deg", "at most 25 %", "60 to 200 rad/s".
 std::string limit_text(const Requirement& requirement);
 
