@@ -1,6 +1,7 @@
 #include "core/loop/step_response.h"
 
 #include "core/loop/closed_loop_poles.h"
+#include "core/loop/delayed_step.h"
 #include "core/loop/rational_step.h"
 #include "core/loop/step_drawing.h"
 #include "core/numerics/number_text.h"
@@ -26,9 +27,9 @@ TimePlant time_plant(const LoopPlant& plant) {
     return {&fit->model, "from the fit, misfit " + number_text(fit->misfit_db, digits) + " dB"};
 }
 
-TimeAssessment without_fit(const FigureRequest& request) {
-    TimeAssessment result{no_time_figures(request, no_fit), {}};
-    result.curves.note = no_fit;
+TimeAssessment without(const FigureRequest& request, const std::string& reason) {
+    TimeAssessment result{no_time_figures(request, reason), {}};
+    result.curves.note = reason;
     return result;
 }
 
@@ -43,24 +44,42 @@ TimeAssessment assessed(const StepSignals& signals, const FigureRequest& request
     return result;
 }
 
+/// The hold counts as a delay of half its period, standing where the computation delay does.
+DelayedLoop delayed(const DesignLoop& loop, const PlantModel& plant) {
+    return {loop.compensator, plant.roots, plant.dead_time_s,
+            loop.computation_delay_s + 0.5 * loop.hold_period_s};
+}
+
+constexpr const char* no_history =
+    "the response behind the dead time could not be followed until it settles";
+
 } // namespace
 
 TimeAssessment assess_time(const DesignLoop& loop, const FigureRequest& request,
                            const ComplexVector& closed_loop_poles) {
     const TimePlant plant = time_plant(loop.plant);
     if (plant.model == nullptr)
-        return without_fit(request);
-    return assessed(rational_step(loop.compensator, plant.model->roots, closed_loop_poles), request,
-                    plant.note);
+        return without(request, no_fit);
+    const DelayedLoop with_delay = delayed(loop, *plant.model);
+    if (with_delay.delay_s() == 0.0)
+        return assessed(rational_step(loop.compensator, plant.model->roots, closed_loop_poles),
+                        request, plant.note);
+    const std::optional<StepSignals> signals = delayed_step(with_delay);
+    return signals ? assessed(*signals, request, plant.note) : without(request, no_history);
 }
 
 StepCurves step_curves(const DesignLoop& loop, double until_s, int points) {
     const TimePlant plant = time_plant(loop.plant);
     if (plant.model == nullptr)
         return {{}, {}, {}, {}, no_fit};
-    const StepSignals signals =
-        rational_step(loop.compensator, plant.model->roots, closed_loop_poles(loop).poles);
-    StepCurves curves = curves_at(signals, even_times(until_s, points));
+    const DelayedLoop with_delay = delayed(loop, *plant.model);
+    const std::optional<StepSignals> signals =
+        with_delay.delay_s() == 0.0
+            ? rational_step(loop.compensator, plant.model->roots, closed_loop_poles(loop).poles)
+            : delayed_step(with_delay, {until_s});
+    if (!signals)
+        return {{}, {}, {}, {}, no_history};
+    StepCurves curves = curves_at(*signals, even_times(until_s, points));
     curves.note = plant.note;
     return curves;
 }
