@@ -1,0 +1,83 @@
+#include "core/placement/problem.h"
+
+#include <algorithm>
+#include <cmath>
+
+namespace cornerwright {
+namespace {
+
+/// How far the closed-loop poles are from where they should be: 0 on the boundary, up to 1.
+double instability_of(const LoopFigures& figures) {
+    double worst = 0.0;
+    for (const Complex& pole : figures.closed_loop_poles) {
+        const double size = std::abs(pole);
+        if (size > 0.0)
+            worst = std::max(worst, figures.poles_in_z ? 1.0 - 1.0 / size : pole.real() / size);
+    }
+    return worst;
+}
+
+double merit_of(const Evaluation& evaluation) {
+    double instability = 0.0;
+    bool all_stable = true;
+    for (const PlacementLoop& loop : evaluation.loops) {
+        if (loop.assessment.figures.stability.stable == false) {
+            all_stable = false;
+            instability += 1.0 + instability_of(loop.assessment.figures);
+        }
+    }
+    if (!all_stable)
+        return unstable_merit * (1.0 + instability);
+    double smallest = HUGE_VAL;
+    for (const RequirementResult& result : evaluation.verdict.requirements) {
+        for (const Judgement& judgement : result.all) {
+            if (judgement.share.is_determined())
+                smallest = std::min(smallest, judgement.share.value());
+        }
+    }
+    return std::max(smallest, unstable_merit);
+}
+
+} // namespace
+
+DesignLoop design_loop_with(const PlacementProblem& problem, std::size_t plant,
+                            const Chain& chain) {
+    DesignLoop loop{roots_of(chain), problem.plants[plant].plant, 0.0, 0.0};
+    if (problem.sampling && problem.sampling->design_includes_hold) {
+        loop.computation_delay_s = problem.sampling->computation_delay_s;
+        loop.hold_period_s = problem.sampling->sample_period_s;
+    }
+    return loop;
+}
+
+std::optional<RealisedLoop> realised_loop_with(const PlacementProblem& problem, std::size_t plant,
+                                               const Chain& chain) {
+    if (!problem.realisation)
+        return {};
+    const Sampling sampling = problem.sampling.value_or(Sampling{});
+    return RealisedLoop{discretise(chain, sampling, *problem.realisation),
+                        problem.plants[plant].plant, sampling.computation_delay_s};
+}
+
+Evaluation evaluate(const PlacementProblem& problem, const Chain& chain) {
+    Evaluation evaluation;
+    evaluation.request = request_of(problem.requirements);
+    for (std::size_t i = 0; i < problem.plants.size(); ++i) {
+        DesignLoop design = design_loop_with(problem, i, chain);
+        LoopAssessment assessed = assess_loop(design, evaluation.request);
+        evaluation.loops.push_back({i, LoopName::design, std::move(design), std::move(assessed)});
+        if (auto realised = realised_loop_with(problem, i, chain)) {
+            assessed = assess_loop(*realised, evaluation.request);
+            evaluation.loops.push_back(
+                {i, LoopName::realised, std::move(*realised), std::move(assessed)});
+        }
+    }
+    std::vector<JudgedLoop> judged;
+    for (const PlacementLoop& loop : evaluation.loops)
+        judged.push_back({problem.plants[loop.plant].name, loop.name, &loop.assessment.figures});
+    evaluation.verdict = judge(problem.requirements, evaluation.request, judged);
+    evaluation.merit = merit_of(evaluation);
+    return evaluation;
+}
+
+} // namespace cornerwright
