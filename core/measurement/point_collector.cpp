@@ -1,10 +1,9 @@
 #include "core/measurement/point_collector.h"
 
 #include "core/numerics/error.h"
+#include "core/numerics/number_text.h"
 
 #include <algorithm>
-#include <array>
-#include <charconv>
 #include <numbers>
 #include <utility>
 
@@ -25,12 +24,6 @@ std::string lines_of(const std::vector<SkippedRow>& rows, std::string_view why) 
 
 } // namespace
 
-std::string shortest(double value) {
-    std::array<char, 32> text{};
-    const auto [end, error] = std::to_chars(text.data(), text.data() + text.size(), value);
-    return {text.data(), end};
-}
-
 void PointCollector::refuse(int line, int column, std::string expected, std::string found) const {
     throw InputError({file_name_, line, column > 0 ? std::optional(column) : std::nullopt},
                      std::move(expected), std::move(found));
@@ -38,7 +31,8 @@ void PointCollector::refuse(int line, int column, std::string expected, std::str
 
 void PointCollector::zero_or_negative(int line, double frequency) {
     if (frequency < 0.0)
-        refuse(line, columns_.frequency, "a frequency that is not negative", shortest(frequency));
+        refuse(line, columns_.frequency, "a frequency that is not negative",
+               number_text(frequency));
     skip(line, "zero frequency");
 }
 
@@ -48,27 +42,22 @@ void PointCollector::judge_direction(int line, double w, double frequency) {
         return;
     const int direction = w > last ? 1 : -1;
     if (direction_ == -direction) {
-        // Through shortest text and back the value reads as the file has it, not as a product.
-        std::array<char, 32> text{};
-        const auto [end, error] = std::to_chars(text.data(), text.data() + text.size(),
-                                                last / rad_per_s_, std::chars_format::general, 12);
-        double before = 0.0;
-        std::from_chars(text.data(), end, before);
+        // Twelve digits read as the file has them, not as the product with the unit.
         refuse(line, columns_.frequency, "frequencies in one direction",
-               shortest(frequency) + " after " + shortest(before));
+               number_text(frequency) + " after " + number_text(last / rad_per_s_, 12));
     }
     direction_ = direction;
 }
 
 void PointCollector::judge_size(int line, double first, double second) const {
     if (first < 0.0)
-        refuse(line, columns_.first, "a linear magnitude that is not negative", shortest(first));
+        refuse(line, columns_.first, "a linear magnitude that is not negative", number_text(first));
     if (form_ == PointForm::real_imaginary ? second == 0.0 : magnitude_ == Unit::linear)
         refuse(line, columns_.first, "a response that is not exactly zero", "0");
 }
 
 void PointCollector::refuse_coherence(int line, double coherence) const {
-    refuse(line, columns_.coherence, "a coherence from 0 to 1", shortest(coherence));
+    refuse(line, columns_.coherence, "a coherence from 0 to 1", number_text(coherence));
 }
 
 void PointCollector::convert() {
@@ -102,7 +91,7 @@ void PointCollector::average_repeats() {
             coherence[kept] = coherence_sum / count;
         if (response[kept] == 0.0)
             throw InputError({file_name_, {}, {}}, "a response that is not exactly zero",
-                             "a mean of zero at " + shortest(w[begin]) + " rad/s");
+                             "a mean of zero at " + number_text(w[begin]) + " rad/s");
         ++kept;
     }
     if (repeated == 0)

@@ -91,7 +91,4 @@ class PointCollector {
     ReadResult result_;
 };
 
-/// Shortest text of a number that reads back to the same value.
-std::string shortest(double value);
-
 } // namespace cornerwright

@@ -221,6 +221,9 @@ class LayoutJudge {
         }
         if (!best || (!best->names_kind && kind_ == TableKind::frequency_response))
             return std::nullopt;
+        // "Time: 10:22" in the preamble is no heading of a record.
+        if (kind_ == TableKind::time_record && !best->fits_rows)
+            return std::nullopt;
         // A sentence in a comment may name frequency and gain without being a heading.
         const bool all_named =
             std::all_of(best->headings.begin(), best->headings.end(),
