@@ -1,0 +1,118 @@
+#include "app/window/test_report.h"
+
+#include "widgets/chain/chain_panel.h"
+#include "widgets/chain/section_card.h"
+#include "widgets/ledger/ledger_model.h"
+#include "widgets/ledger/ledger_panel.h"
+#include "widgets/panes/plot_pane.h"
+#include "widgets/parts/quantity_field.h"
+#include "widgets/window/main_window.h"
+#include "widgets/window/work_area.h"
+
+#include <QJsonArray>
+#include <QJsonDocument>
+#include <QJsonObject>
+#include <QSaveFile>
+#include <QTimer>
+
+namespace cornerwright {
+
+namespace {
+
+QJsonObject placeOf(const QWidget& widget) {
+    const QPoint corner = widget.mapToGlobal(QPoint(0, 0));
+    return {{QStringLiteral("x"), corner.x()},
+            {QStringLiteral("y"), corner.y()},
+            {QStringLiteral("width"), widget.width()},
+            {QStringLiteral("height"), widget.height()},
+            {QStringLiteral("visible"), widget.isVisible()}};
+}
+
+QJsonValue figureOf(const Figure& figure) {
+    return figure.is_value() ? QJsonValue(figure.value()) : QJsonValue();
+}
+
+QJsonArray ledgerOf(const LedgerModel& model) {
+    QJsonArray rows;
+    for (int row = 0; row < model.rowCount(); ++row) {
+        const RequirementResult& result = model.result(row);
+        const std::string_view measure = name_of(result.requirement.measure);
+        const std::string_view state = name_of(result.worst.state);
+        rows.append(QJsonObject{
+            {QStringLiteral("measure"), QString::fromUtf8(measure.data(), std::ssize(measure))},
+            {QStringLiteral("state"), QString::fromUtf8(state.data(), std::ssize(state))},
+            {QStringLiteral("case"), QString::fromStdString(result.worst.case_name)},
+            {QStringLiteral("worst"), figureOf(result.worst.value)},
+            {QStringLiteral("headroom"), figureOf(result.worst.headroom)},
+            {QStringLiteral("shown"), model.index(row, LedgerModel::worst).data().toString()}});
+    }
+    return rows;
+}
+
+QJsonArray handlesOf(const PlotPane& pane) {
+    QJsonArray handles;
+    for (const Handle& handle : pane.handles()) {
+        const QPoint at = pane.plotWidget()->mapToGlobal(handle.at.toPoint());
+        handles.append(QJsonObject{{QStringLiteral("name"), handle.name},
+                                   {QStringLiteral("x"), at.x()},
+                                   {QStringLiteral("y"), at.y()}});
+    }
+    return handles;
+}
+
+} // namespace
+
+TestReport::TestReport(MainWindow& window, const QString& file)
+    : QObject(&window), window_(window), file_(file) {
+    // Written when the event loop has come to rest, so that layout and painting are done.
+    auto* later = new QTimer(this);
+    later->setSingleShot(true);
+    later->setInterval(50);
+    connect(later, &QTimer::timeout, this, &TestReport::write);
+    const auto soon = [later] { later->start(); };
+    connect(&window.live(), &LiveContent::contentChanged, this, soon);
+    connect(&window.document(), &Document::historyChanged, this, soon);
+    connect(&window.document(), &Document::fileChanged, this, soon);
+    soon();
+}
+
+void TestReport::write() {
+    QJsonObject report;
+    report[QStringLiteral("number")] = ++number_;
+    report[QStringLiteral("busy")] = window_.live().runner().isBusy();
+    report[QStringLiteral("modified")] = window_.document().isModified();
+    report[QStringLiteral("can_undo")] = window_.document().canUndo();
+    report[QStringLiteral("file")] = window_.document().filePath();
+    report[QStringLiteral("window")] = placeOf(window_);
+    report[QStringLiteral("ledger")] = ledgerOf(*window_.ledger().model());
+    QJsonObject panes;
+    for (const auto& [key, pane] : window_.area().panes()) {
+        QJsonObject entry = placeOf(*pane);
+        if (const auto* plot = qobject_cast<const PlotPane*>(pane)) {
+            entry[QStringLiteral("handles")] = handlesOf(*plot);
+        }
+        panes[key] = entry;
+    }
+    report[QStringLiteral("panes")] = panes;
+    QJsonArray cards;
+    for (const SectionCard* card : window_.chain().cards()) {
+        QJsonObject entry = placeOf(*card);
+        QJsonArray fields;
+        for (const QuantityField* field : card->fields()) {
+            QJsonObject shown = placeOf(*field);
+            shown[QStringLiteral("name")] = field->accessibleName();
+            shown[QStringLiteral("value")] = field->value().value_or(0.0);
+            fields.append(shown);
+        }
+        entry[QStringLiteral("fields")] = fields;
+        cards.append(entry);
+    }
+    report[QStringLiteral("cards")] = cards;
+    QSaveFile out(file_);
+    if (out.open(QIODevice::WriteOnly)) {
+        out.write(QJsonDocument(report).toJson());
+        out.commit();
+    }
+}
+
+} // namespace cornerwright

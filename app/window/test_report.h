@@ -1,0 +1,27 @@
+#pragma once
+
+#include <QObject>
+#include <QString>
+
+namespace cornerwright {
+
+class MainWindow;
+
+/// For end-to-end tests: after every change of what the window shows, writes a JSON file with the
+/// figures of the ledger, the undo state, and where on the screen the parts stand that a test
+/// clicks or drags. The file is replaced in one step, and carries a number that rises.
+class TestReport : public QObject {
+    Q_OBJECT
+
+  public:
+    TestReport(MainWindow& window, const QString& file);
+
+  private:
+    void write();
+
+    MainWindow& window_;
+    QString file_;
+    int number_ = 0;
+};
+
+} // namespace cornerwright

@@ -1,0 +1,13 @@
+#pragma once
+
+#include "core/project/project.h"
+
+#include <QString>
+
+namespace cornerwright {
+
+/// The same project told from `newFolder`: every measurement's file name, relative to `oldFolder`
+/// before, is relative to `newFolder` after.
+Project rebased(const Project& project, const QString& oldFolder, const QString& newFolder);
+
+} // namespace cornerwright

@@ -1,0 +1,208 @@
+#include "widgets/window/file_flow.h"
+
+#include "core/numerics/error.h"
+#include "widgets/cases/case_edits.h"
+#include "widgets/document/document.h"
+#include "widgets/window/notice_strip.h"
+
+#include <QFileDialog>
+#include <QFileInfo>
+#include <QLocale>
+
+namespace cornerwright {
+
+namespace {
+
+const QString projectSuffix = QStringLiteral(".cornerwright.json");
+const QString fileTopic = QStringLiteral("file");
+const QString unsavedTopic = QStringLiteral("unsaved");
+const QString recoveryTopic = QStringLiteral("recovery");
+
+} // namespace
+
+FileFlow::FileFlow(Document& document, NoticeStrip& notices, QSettings& settings,
+                   const QString& recoveryFolder, QWidget* window)
+    : QObject(window),
+      document_(document),
+      notices_(notices),
+      recent_(settings),
+      recovery_(document, recoveryFolder),
+      window_(window) {
+    connect(&recovery_, &RecoveryCopy::failed, this, [this](const QString& why) {
+        notices_.show(NoticeStrip::Kind::problem, why, QStringLiteral("recovery-failed"));
+    });
+}
+
+void FileFlow::whenSafe(const QString& question, const std::function<void()>& next) {
+    if (!document_.isModified()) {
+        next();
+        return;
+    }
+    notices_.show(NoticeStrip::Kind::question, question, unsavedTopic,
+                  {{tr("Save"),
+                    [this, next] {
+                        if (save()) {
+                            next();
+                        }
+                    }},
+                   {tr("Discard changes"), next},
+                   {tr("Stay"), [] {}}});
+}
+
+void FileFlow::open(const QString& path) {
+    whenSafe(tr("%1 has unsaved changes. Save them before another project is opened?")
+                 .arg(document_.displayName()),
+             [this, path] { openNow(path); });
+}
+
+void FileFlow::openNow(const QString& path) {
+    try {
+        const QStringList told = document_.open(path);
+        notices_.close(fileTopic);
+        recent_.add(document_.filePath());
+        for (const QString& sentence : told) {
+            notices_.show(NoticeStrip::Kind::information, sentence);
+        }
+    } catch (const InputError& error) {
+        notices_.show(NoticeStrip::Kind::problem, QString::fromUtf8(error.what()), fileTopic);
+    }
+}
+
+void FileFlow::openDemo(const QString& path) {
+    try {
+        for (const QString& sentence : document_.openAsCopy(path)) {
+            notices_.show(NoticeStrip::Kind::information, sentence);
+        }
+    } catch (const InputError& error) {
+        notices_.show(NoticeStrip::Kind::problem, QString::fromUtf8(error.what()), fileTopic);
+    }
+}
+
+void FileFlow::chooseAndOpen() {
+    const QString path = QFileDialog::getOpenFileName(
+        window_, tr("Open project"), document_.folder(),
+        tr("Cornerwright projects (*%1);;All files (*)").arg(projectSuffix));
+    if (!path.isEmpty()) {
+        open(path);
+    }
+}
+
+void FileFlow::newProject() {
+    whenSafe(tr("%1 has unsaved changes. Save them before a new project is started?")
+                 .arg(document_.displayName()),
+             [this] {
+                 Project empty;
+                 empty.compensator.push_back(Section{});
+                 document_.reset(std::move(empty), QString(), document_.folder());
+             });
+}
+
+bool FileFlow::save() {
+    return document_.filePath().isEmpty() ? saveAs() : saveTo(document_.filePath());
+}
+
+bool FileFlow::saveAs() {
+    QString path = QFileDialog::getSaveFileName(
+        window_, tr("Save project"),
+        document_.filePath().isEmpty() ? document_.folder() : document_.filePath(),
+        tr("Cornerwright projects (*%1)").arg(projectSuffix));
+    if (path.isEmpty()) {
+        return false;
+    }
+    if (!path.endsWith(projectSuffix)) {
+        path += projectSuffix;
+    }
+    return saveTo(path);
+}
+
+bool FileFlow::saveTo(const QString& path) {
+    try {
+        document_.save(path);
+    } catch (const WriteError& error) {
+        notices_.show(NoticeStrip::Kind::problem, QString::fromUtf8(error.what()), fileTopic);
+        return false;
+    }
+    notices_.close(fileTopic);
+    notices_.close(unsavedTopic);
+    recent_.add(document_.filePath());
+    return true;
+}
+
+void FileFlow::chooseMeasurements() {
+    const QStringList paths =
+        QFileDialog::getOpenFileNames(window_, tr("Add measurements"), document_.folder(),
+                                      tr("Measurements (*.csv *.txt *.dat *.tsv *.s?p *.ts *.uff "
+                                         "*.unv *.58);;All files (*)"));
+    addMeasurements(paths);
+}
+
+void FileFlow::addMeasurements(const QStringList& paths) {
+    Project next = document_.project();
+    QStringList names;
+    for (const QString& path : paths) {
+        try {
+            TakenMeasurement taken = takeMeasurement(path, document_.folder());
+            const QString name = freeCaseName(next, QString::fromStdString(taken.plantCase.name));
+            taken.plantCase.name = name.toStdString();
+            next = withCaseAdded(next, taken.plantCase);
+            names << name;
+            if (!taken.remarks.isEmpty()) {
+                notices_.show(
+                    NoticeStrip::Kind::information,
+                    QStringLiteral("%1: %2").arg(name, taken.remarks.join(QLatin1Char(' '))));
+            }
+        } catch (const InputError& error) {
+            notices_.show(NoticeStrip::Kind::problem, QString::fromUtf8(error.what()));
+        }
+    }
+    if (!names.isEmpty()) {
+        document_.apply(std::move(next), tr("Add %1").arg(names.join(QStringLiteral(", "))));
+    }
+}
+
+void FileFlow::take(const QStringList& paths) {
+    QStringList measurements;
+    for (const QString& path : paths) {
+        if (path.endsWith(QStringLiteral(".json"))) {
+            open(path);
+            return;
+        }
+        measurements << path;
+    }
+    addMeasurements(measurements);
+}
+
+void FileFlow::offerRecovery() {
+    const std::vector<RecoverableProject> found = recovery_.leftBehind();
+    // The newest is offered; the question comes again for the next once this one is settled.
+    if (!found.empty()) {
+        offer(found.front());
+    }
+}
+
+void FileFlow::offer(const RecoverableProject& found) {
+    const QString name = !found.originalPath.isEmpty() ? QFileInfo(found.originalPath).fileName()
+                         : found.title.isEmpty()       ? tr("an unsaved project")
+                                                       : found.title;
+    const QString when = QLocale().toString(found.savedAt, QLocale::ShortFormat);
+    notices_.show(NoticeStrip::Kind::question,
+                  tr("The program did not end in order last time. Unsaved changes of %1 from %2 "
+                     "were kept.")
+                      .arg(name, when),
+                  recoveryTopic,
+                  {{tr("Recover"),
+                    [this, found] {
+                        try {
+                            recovery_.recover(found);
+                        } catch (const InputError& error) {
+                            notices_.show(NoticeStrip::Kind::problem,
+                                          QString::fromUtf8(error.what()), recoveryTopic);
+                        }
+                    }},
+                   {tr("Discard"), [this, found] {
+                        RecoveryCopy::discard(found);
+                        offerRecovery();
+                    }}});
+}
+
+} // namespace cornerwright

@@ -1,0 +1,276 @@
+#include "widgets/window/main_window.h"
+
+#include "widgets/cases/cases_panel.h"
+#include "widgets/chain/chain_edits.h"
+#include "widgets/chain/chain_panel.h"
+#include "widgets/figure_text.h"
+#include "widgets/ledger/ledger_panel.h"
+#include "widgets/window/about_page.h"
+#include "widgets/window/file_flow.h"
+#include "widgets/window/notice_strip.h"
+#include "widgets/window/pane_set.h"
+#include "widgets/window/pane_slot.h"
+#include "widgets/window/run_status.h"
+#include "widgets/window/top_bar.h"
+#include "widgets/window/verdict_pill.h"
+#include "widgets/window/window_actions.h"
+#include "widgets/window/window_menus.h"
+#include "widgets/window/work_area.h"
+
+#include <QApplication>
+#include <QCloseEvent>
+#include <QMimeData>
+#include <QStackedWidget>
+#include <QStatusTipEvent>
+#include <QTableView>
+#include <QVBoxLayout>
+
+namespace cornerwright {
+
+namespace {
+
+constexpr QSize firstSize(1600, 950);
+const QString geometryKey = QStringLiteral("geometry");
+
+QStringList localPaths(const QMimeData& data) {
+    QStringList paths;
+    for (const QUrl& url : data.urls()) {
+        if (url.isLocalFile()) {
+            paths << url.toLocalFile();
+        }
+    }
+    return paths;
+}
+
+} // namespace
+
+MainWindow::MainWindow(const Places& places, QWidget* parent)
+    : QMainWindow(parent),
+      settings_(places.settingsFile, QSettings::IniFormat),
+      live_(document_, viewState_),
+      actions_(new WindowActions(this)) {
+    setAcceptDrops(true);
+    build();
+    files_ = new FileFlow(document_, *notices_, settings_, places.recoveryFolder, this);
+    fillMenus(*this);
+    connectActions();
+    connectSectionActions();
+    connectDocument();
+    connectPanes();
+    showHistory();
+    showCases();
+    resize(firstSize);
+    restoreGeometry(settings_.value(geometryKey).toByteArray());
+    area_->restore(settings_);
+}
+
+MainWindow::~MainWindow() = default;
+
+void MainWindow::build() {
+    bar_ = new TopBar(*actions_, this);
+    notices_ = new NoticeStrip(this);
+    chain_ = new ChainPanel(document_, viewState_, this);
+    cases_ = new CasesPanel(document_, viewState_, this);
+    ledger_ = new LedgerPanel(document_, viewState_, this);
+    area_ = new WorkArea(chain_, cases_, ledger_, this);
+    makePanes(*area_, viewState_);
+    auto* about = new AboutPage(this);
+    status_ = new RunStatus(this);
+    pages_ = new QStackedWidget(this);
+    pages_->addWidget(area_);
+    pages_->addWidget(about);
+
+    auto* whole = new QWidget(this);
+    auto* layout = new QVBoxLayout(whole);
+    layout->setContentsMargins(0, 0, 0, 0);
+    layout->setSpacing(0);
+    layout->addWidget(bar_);
+    layout->addWidget(notices_);
+    layout->addWidget(pages_, 1);
+    layout->addWidget(status_);
+    setCentralWidget(whole);
+    connect(about, &AboutPage::closed, this, [this] { showAbout(false); });
+}
+
+void MainWindow::connectActions() {
+    connect(actions_->newProject, &QAction::triggered, files_, &FileFlow::newProject);
+    connect(actions_->open, &QAction::triggered, files_, &FileFlow::chooseAndOpen);
+    connect(actions_->save, &QAction::triggered, files_, &FileFlow::save);
+    connect(actions_->saveAs, &QAction::triggered, files_, &FileFlow::saveAs);
+    connect(actions_->addMeasurements, &QAction::triggered, files_, &FileFlow::chooseMeasurements);
+    connect(cases_, &CasesPanel::measurementAsked, files_, &FileFlow::chooseMeasurements);
+    connect(actions_->quit, &QAction::triggered, this, &QWidget::close);
+    connect(actions_->undo, &QAction::triggered, &document_, &Document::undo);
+    connect(actions_->redo, &QAction::triggered, &document_, &Document::redo);
+    connect(actions_->addFormula, &QAction::triggered, cases_, &CasesPanel::beginFormula);
+    connect(actions_->hertz, &QAction::toggled, &viewState_, &ViewState::setShowsHertz);
+    connect(actions_->nextCase, &QAction::triggered, this, [this] { stepCase(1); });
+    connect(actions_->previousCase, &QAction::triggered, this, [this] { stepCase(-1); });
+    connect(actions_->wholePane, &QAction::triggered, this, &MainWindow::setWholePane);
+    connect(actions_->allPanes, &QAction::triggered, this, [this] { area_->setWhole(nullptr); });
+    connect(actions_->about, &QAction::triggered, this, [this] { showAbout(true); });
+    connect(bar_, &TopBar::caseChosen, this,
+            [this](int index) { viewState_.setShownCase(static_cast<std::size_t>(index)); });
+    connect(bar_->pill(), &VerdictPill::clicked, this, &MainWindow::goToWorst);
+}
+
+void MainWindow::connectSectionActions() {
+    const auto changeSelected = [this](auto change, const QString& what) {
+        const std::optional<std::size_t> selected = viewState_.selectedSection();
+        if (selected) {
+            Section section = document_.project().compensator[*selected];
+            change(section);
+            document_.apply(withSectionChanged(document_.project(), *selected, section), what);
+        }
+    };
+    connect(actions_->switchSection, &QAction::triggered, this, [changeSelected] {
+        changeSelected([](Section& section) { section.enabled = !section.enabled; },
+                       tr("Turn section off or on"));
+    });
+    connect(actions_->lockSection, &QAction::triggered, this, [changeSelected] {
+        changeSelected([](Section& section) { section.locked = !section.locked; },
+                       tr("Lock or unlock section"));
+    });
+    connect(actions_->removeSection, &QAction::triggered, this, [this] {
+        const std::optional<std::size_t> selected = viewState_.selectedSection();
+        if (selected) {
+            const QString name = sectionText(document_.project().compensator[*selected]);
+            document_.apply(withSectionRemoved(document_.project(), *selected),
+                            tr("Remove %1").arg(name));
+        }
+    });
+}
+
+void MainWindow::connectDocument() {
+    connect(&document_, &Document::historyChanged, this, &MainWindow::showHistory);
+    connect(&document_, &Document::fileChanged, this, &MainWindow::showHistory);
+    connect(&document_, &Document::projectChanged, this, &MainWindow::showCases);
+    connect(&viewState_, &ViewState::shownCaseChanged, this, &MainWindow::showCases);
+    connect(&viewState_, &ViewState::unitChanged, this, [this] {
+        actions_->hertz->setChecked(viewState_.showsHertz());
+        bar_->setHertz(viewState_.showsHertz());
+        showContent();
+    });
+    connect(&live_, &LiveContent::contentChanged, this, &MainWindow::showContent);
+    AssessmentRunner& runner = live_.runner();
+    connect(&runner, &AssessmentRunner::busyChanged, this, [this](bool busy) {
+        busy ? status_->begin(tr("Assessing every case …")) : status_->end();
+    });
+    connect(&runner, &AssessmentRunner::failed, this, [this](const QString& why) {
+        notices_->show(NoticeStrip::Kind::problem, tr("The assessment failed: %1").arg(why),
+                       QStringLiteral("assessment"));
+    });
+    connect(status_, &RunStatus::cancelAsked, &runner, &AssessmentRunner::cancel);
+    chain_->setPlaceForNew([this] {
+        constexpr double fallback = 10.0;
+        const PaneContent& content = live_.content();
+        if (!content.assessment || viewState_.shownCase() >= content.assessment->cases.size()) {
+            return fallback;
+        }
+        const auto& crossovers = content.assessment->cases[viewState_.shownCase()]
+                                     .design.figures.frequency.crossovers_rad_s;
+        return crossovers.empty() ? fallback : crossovers.back();
+    });
+}
+
+void MainWindow::connectPanes() {
+    for (const auto& [key, pane] : area_->panes()) {
+        connect(pane, &Pane::dragStarted, &document_, &Document::beginDrag);
+        connect(pane, &Pane::dragMoved, &document_, &Document::previewDrag);
+        connect(pane, &Pane::dragFinished, &document_, &Document::commitDrag);
+        connect(pane, &Pane::dragCancelled, &document_, &Document::cancelDrag);
+        connect(pane, &Pane::edited, this,
+                [this](const std::shared_ptr<const Project>& proposed, const QString& what) {
+                    document_.apply(*proposed, what);
+                });
+    }
+}
+
+void MainWindow::showContent() {
+    const PaneContent& content = live_.content();
+    area_->setContent(content);
+    ledger_->setContent(content);
+    cases_->setContent(content);
+    bar_->pill()->setVerdict(content.assessment ? &content.assessment->verdict : nullptr,
+                             viewState_.showsHertz());
+}
+
+void MainWindow::showHistory() {
+    actions_->setUndo(document_.canUndo(), document_.undoText());
+    actions_->setRedo(document_.canRedo(), document_.redoText());
+    setWindowTitle(tr("%1[*] - Cornerwright").arg(document_.displayName()));
+    setWindowModified(document_.isModified());
+    setWindowFilePath(document_.filePath());
+    status_->setFacts(document_.isModified() ? tr("unsaved changes") : QString());
+}
+
+void MainWindow::showCases() {
+    QStringList names;
+    for (const PlantCase& plantCase : document_.project().plant_cases) {
+        names << QString::fromStdString(plantCase.name);
+    }
+    bar_->setCases(names, static_cast<int>(viewState_.shownCase()));
+}
+
+void MainWindow::showAbout(bool on) {
+    pages_->setCurrentIndex(on ? 1 : 0);
+    pages_->currentWidget()->setFocus(Qt::OtherFocusReason);
+}
+
+void MainWindow::stepCase(int by) {
+    const auto count = static_cast<int>(document_.project().plant_cases.size());
+    if (count > 0) {
+        const int next = (static_cast<int>(viewState_.shownCase()) + by + count) % count;
+        viewState_.setShownCase(static_cast<std::size_t>(next));
+    }
+}
+
+void MainWindow::goToWorst() {
+    area_->setWhole(nullptr);
+    ledger_->goToFirst();
+}
+
+void MainWindow::setWholePane() {
+    QWidget* widget = QApplication::focusWidget();
+    while (widget != nullptr && qobject_cast<PaneSlot*>(widget) == nullptr && widget != ledger_) {
+        widget = widget->parentWidget();
+    }
+    area_->setWhole(widget != nullptr && widget != area_->whole() ? widget : nullptr);
+}
+
+void MainWindow::closeEvent(QCloseEvent* event) {
+    if (!mayClose_ && document_.isModified()) {
+        event->ignore();
+        files_->whenSafe(
+            tr("%1 has unsaved changes. Save them before leaving?").arg(document_.displayName()),
+            [this] {
+                mayClose_ = true;
+                close();
+            });
+        return;
+    }
+    settings_.setValue(geometryKey, saveGeometry());
+    area_->save(settings_);
+    event->accept();
+}
+
+void MainWindow::dragEnterEvent(QDragEnterEvent* event) {
+    if (!localPaths(*event->mimeData()).isEmpty()) {
+        event->acceptProposedAction();
+    }
+}
+
+void MainWindow::dropEvent(QDropEvent* event) {
+    files_->take(localPaths(*event->mimeData()));
+    event->acceptProposedAction();
+}
+
+bool MainWindow::event(QEvent* event) {
+    if (event->type() == QEvent::StatusTip) {
+        status_->setHint(static_cast<QStatusTipEvent*>(event)->tip());
+        return true;
+    }
+    return QMainWindow::event(event);
+}
+
+} // namespace cornerwright

@@ -1,0 +1,89 @@
+#pragma once
+
+#include "widgets/document/document.h"
+#include "widgets/document/live_content.h"
+#include "widgets/view_state.h"
+
+#include <QMainWindow>
+#include <QSettings>
+
+#include <memory>
+
+class QStackedWidget;
+
+namespace cornerwright {
+
+class CasesPanel;
+class ChainPanel;
+class FileFlow;
+class LedgerPanel;
+class NoticeStrip;
+class RunStatus;
+class TopBar;
+class WindowActions;
+class WorkArea;
+
+/// The window. It holds the document and the shared view state and connects the parts; what the
+/// parts do is theirs.
+class MainWindow : public QMainWindow {
+    Q_OBJECT
+
+  public:
+    /// Where the window remembers its layout and recent files, and where recovery copies lie.
+    struct Places {
+        QString settingsFile;
+        QString recoveryFolder;
+    };
+
+    explicit MainWindow(const Places& places, QWidget* parent = nullptr);
+    ~MainWindow() override;
+
+    Document& document() { return document_; }
+    ViewState& viewState() { return viewState_; }
+    LiveContent& live() { return live_; }
+    FileFlow& files() { return *files_; }
+    WorkArea& area() { return *area_; }
+    ChainPanel& chain() { return *chain_; }
+    CasesPanel& cases() { return *cases_; }
+    LedgerPanel& ledger() { return *ledger_; }
+    NoticeStrip& notices() { return *notices_; }
+    WindowActions& actions() { return *actions_; }
+
+  protected:
+    void closeEvent(QCloseEvent* event) override;
+    void dragEnterEvent(QDragEnterEvent* event) override;
+    void dropEvent(QDropEvent* event) override;
+    bool event(QEvent* event) override;
+
+  private:
+    void build();
+    void connectActions();
+    void connectSectionActions();
+    void connectDocument();
+    void connectPanes();
+    void showContent();
+    void showHistory();
+    void showCases();
+    void showAbout(bool on);
+    void stepCase(int by);
+    void goToWorst();
+    void setWholePane();
+
+    QSettings settings_;
+    Document document_;
+    ViewState viewState_;
+    LiveContent live_;
+    WindowActions* actions_;
+    TopBar* bar_;
+    NoticeStrip* notices_;
+    QStackedWidget* pages_;
+    ChainPanel* chain_;
+    CasesPanel* cases_;
+    LedgerPanel* ledger_;
+    WorkArea* area_;
+    RunStatus* status_;
+    FileFlow* files_;
+    bool mayClose_ = false;
+};
+
+} // namespace cornerwright

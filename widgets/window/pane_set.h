@@ -1,0 +1,11 @@
+#pragma once
+
+namespace cornerwright {
+
+class ViewState;
+class WorkArea;
+
+/// Makes every pane and puts it into the work area. To add a pane, make it here.
+void makePanes(WorkArea& area, ViewState& viewState);
+
+} // namespace cornerwright

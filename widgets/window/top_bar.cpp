@@ -1,0 +1,122 @@
+#include "widgets/window/top_bar.h"
+
+#include "widgets/theme.h"
+#include "widgets/window/verdict_pill.h"
+#include "widgets/window/window_actions.h"
+
+#include <QFrame>
+#include <QHBoxLayout>
+#include <QMenu>
+#include <QPainter>
+#include <QToolButton>
+
+namespace cornerwright {
+
+namespace {
+constexpr int longestCaseName = 24;
+
+QString shortened(const QString& text) {
+    return text.size() <= longestCaseName ? text : text.left(longestCaseName - 1) + QChar(0x2026);
+}
+} // namespace
+
+TopBar::TopBar(const WindowActions& actions, QWidget* parent)
+    : QWidget(parent),
+      case_(new QToolButton(this)),
+      caseMenu_(new QMenu(this)),
+      trial_(new QToolButton(this)),
+      trialMenu_(new QMenu(this)),
+      pill_(new VerdictPill(this)) {
+    auto* row = new QHBoxLayout(this);
+    row->setContentsMargins(8, 4, 10, 4);
+    row->setSpacing(1);
+    addButton(row, actions.open);
+    addButton(row, actions.save);
+    addLine(row);
+    addButton(row, actions.undo);
+    addButton(row, actions.redo);
+    addLine(row);
+    hertz_ = addButton(row, actions.hertz);
+    hertz_->setFont(fontOf(FontRole::strong));
+    addLine(row);
+    for (QToolButton* button : {case_, trial_}) {
+        button->setAutoRaise(true);
+        button->setPopupMode(QToolButton::InstantPopup);
+        button->setToolButtonStyle(Qt::ToolButtonTextOnly);
+        button->setFocusPolicy(Qt::TabFocus);
+    }
+    case_->setMenu(caseMenu_);
+    case_->setToolTip(tr("The case drawn full, with the handles on its curve"));
+    trial_->setMenu(trialMenu_);
+    trial_->setToolTip(tr("A kept trial to compare with"));
+    row->addWidget(case_);
+    addLine(row);
+    row->addWidget(trial_);
+    addButton(row, actions.keepTrial);
+    addLine(row);
+    addButton(row, actions.showHandover);
+    row->addStretch(1);
+    row->addWidget(pill_, 0);
+    setHertz(true);
+    setTrialName({});
+    setCases({}, 0);
+}
+
+QToolButton* TopBar::addButton(QHBoxLayout* row, QAction* action) {
+    auto* button = new QToolButton(this);
+    button->setDefaultAction(action);
+    button->setAutoRaise(true);
+    button->setToolButtonStyle(Qt::ToolButtonTextOnly);
+    button->setFocusPolicy(Qt::TabFocus);
+    button->setAccessibleName(action->iconText());
+    row->addWidget(button);
+    return button;
+}
+
+void TopBar::addLine(QHBoxLayout* row) {
+    auto* line = new QFrame(this);
+    line->setFrameShape(QFrame::VLine);
+    line->setFrameShadow(QFrame::Plain);
+    QPalette colours;
+    colours.setColor(QPalette::WindowText, Theme::of(palette()).colour(ColourRole::hairline));
+    line->setPalette(colours);
+    row->addSpacing(5);
+    row->addWidget(line);
+    row->addSpacing(5);
+}
+
+void TopBar::setHertz(bool on) {
+    // Written on the button itself: the action's own text says what switching does.
+    hertz_->defaultAction()->setIconText(on ? tr("Hz") : tr("rad/s"));
+    hertz_->setAccessibleName(on ? tr("Frequencies in Hz; switch to rad/s")
+                                 : tr("Frequencies in rad/s; switch to Hz"));
+}
+
+void TopBar::setCases(const QStringList& names, int shown) {
+    caseMenu_->clear();
+    for (int i = 0; i < names.size(); ++i) {
+        QAction* action = caseMenu_->addAction(names[i], this, [this, i] { Q_EMIT caseChosen(i); });
+        action->setCheckable(true);
+        action->setChecked(i == shown);
+    }
+    const QString name = shown >= 0 && shown < names.size() ? names[shown] : tr("no case");
+    case_->setText(tr("Case: %1").arg(shortened(name)));
+    case_->setAccessibleName(tr("Case shown: %1").arg(name));
+    case_->setEnabled(!names.isEmpty());
+}
+
+void TopBar::setTrialName(const QString& name) {
+    trial_->setText(name.isEmpty() ? tr("Trial: none") : tr("Trial: %1").arg(shortened(name)));
+    trial_->setAccessibleName(trial_->text());
+}
+
+void TopBar::paintEvent(QPaintEvent*) {
+    const Theme& theme = Theme::of(palette());
+    QPainter painter(this);
+    constexpr double share = 0.6;
+    painter.fillRect(rect(), theme.faint(ColourRole::paper, share));
+    painter.setPen(theme.colour(ColourRole::hairline));
+    painter.drawLine(rect().bottomLeft(), rect().bottomRight());
+}
+
+} // namespace cornerwright

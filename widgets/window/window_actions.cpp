@@ -1,0 +1,82 @@
+#include "widgets/window/window_actions.h"
+
+#include <QKeySequence>
+#include <QWidget>
+
+namespace cornerwright {
+
+WindowActions::WindowActions(QWidget* window) : QObject(window), window_(window) {
+    newProject = make(tr("&New"), QKeySequence::New, tr("Start an empty project"));
+    open = make(tr("&Open"), QKeySequence::Open, tr("Open a project file"));
+    save = make(tr("&Save"), QKeySequence::Save, tr("Save the project"));
+    saveAs = make(tr("Save &as"), QKeySequence(Qt::CTRL | Qt::SHIFT | Qt::Key_S),
+                  tr("Save the project under another name"));
+    addMeasurements = make(tr("Add &measurements"), QKeySequence(Qt::CTRL | Qt::Key_M),
+                           tr("Take measurement files in as plant cases"));
+    quit = make(tr("&Quit"), QKeySequence(Qt::CTRL | Qt::Key_Q), tr("Leave the program"));
+    quit->setMenuRole(QAction::QuitRole);
+
+    undo = make(tr("&Undo"), QKeySequence::Undo, tr("Take the last step back"));
+    redo =
+        make(tr("&Redo"), QKeySequence(Qt::CTRL | Qt::SHIFT | Qt::Key_Z), tr("Do the step again"));
+    redo->setShortcuts(
+        {QKeySequence(Qt::CTRL | Qt::SHIFT | Qt::Key_Z), QKeySequence(Qt::CTRL | Qt::Key_Y)});
+    addFormula = make(tr("Add plant &formula"), QKeySequence(Qt::CTRL | Qt::Key_F),
+                      tr("Add a plant case from a formula in s"));
+    removeSection = make(tr("&Remove section"), QKeySequence(Qt::CTRL | Qt::Key_Delete),
+                         tr("Remove the selected section"));
+    switchSection = make(tr("Turn section off or &on"), QKeySequence(Qt::CTRL | Qt::Key_Space),
+                         tr("Turn the selected section off or on"));
+    lockSection = make(tr("&Lock or unlock section"), QKeySequence(Qt::CTRL | Qt::Key_L),
+                       tr("Locked corners stay where they are"));
+
+    hertz = make(tr("&Hz instead of rad/s"), QKeySequence(Qt::CTRL | Qt::Key_H),
+                 tr("Show frequencies in Hz or in rad/s"));
+    hertz->setCheckable(true);
+    hertz->setChecked(true);
+    nextCase = make(tr("&Next case"), QKeySequence(Qt::CTRL | Qt::Key_PageDown),
+                    tr("Show the next plant case"));
+    previousCase = make(tr("&Previous case"), QKeySequence(Qt::CTRL | Qt::Key_PageUp),
+                        tr("Show the plant case before"));
+    wholePane = make(tr("Pane takes the &whole window"), QKeySequence(Qt::Key_F11),
+                     tr("The pane with the focus takes the whole window"));
+    allPanes = make(tr("&All panes again"), QKeySequence(Qt::SHIFT | Qt::Key_F11),
+                    tr("Go back to all panes"));
+
+    keepTrial = make(tr("&Keep as trial"), QKeySequence(Qt::CTRL | Qt::Key_K),
+                     tr("Keep a copy of this design to compare against"));
+    keepTrial->setIconText(tr("Keep"));
+    showTrials = make(tr("Compare &trials"), QKeySequence(Qt::CTRL | Qt::Key_T),
+                      tr("Show kept trials and how their figures differ"));
+    showHandover = make(tr("&Handover"), QKeySequence(Qt::CTRL | Qt::Key_D),
+                        tr("Sampling and realisation: what the firmware gets"));
+
+    about = make(tr("&About Cornerwright"), QKeySequence(),
+                 tr("What this program is, and its cautions"));
+    about->setMenuRole(QAction::AboutRole);
+}
+
+QAction* WindowActions::make(const QString& text, const QKeySequence& keys, const QString& tip) {
+    auto* action = new QAction(text, this);
+    action->setShortcut(keys);
+    action->setToolTip(keys.isEmpty() ? tip
+                                      : QStringLiteral("%1 (%2)").arg(
+                                            tip, keys.toString(QKeySequence::NativeText)));
+    action->setStatusTip(tip);
+    window_->addAction(action);
+    return action;
+}
+
+void WindowActions::setUndo(bool can, const QString& what) {
+    undo->setEnabled(can);
+    undo->setText(what.isEmpty() ? tr("&Undo") : tr("&Undo: %1").arg(what));
+    undo->setIconText(tr("Undo"));
+}
+
+void WindowActions::setRedo(bool can, const QString& what) {
+    redo->setEnabled(can);
+    redo->setText(what.isEmpty() ? tr("&Redo") : tr("&Redo: %1").arg(what));
+    redo->setIconText(tr("Redo"));
+}
+
+} // namespace cornerwright

@@ -1,0 +1,51 @@
+#pragma once
+
+#include <QAction>
+#include <QObject>
+
+namespace cornerwright {
+
+/// Every command of the window, made once, so that bar, menus and shortcuts agree.
+class WindowActions : public QObject {
+    Q_OBJECT
+
+  public:
+    explicit WindowActions(QWidget* window);
+
+    QAction* newProject;
+    QAction* open;
+    QAction* save;
+    QAction* saveAs;
+    QAction* addMeasurements;
+    QAction* quit;
+
+    QAction* undo;
+    QAction* redo;
+    QAction* addFormula;
+    QAction* removeSection;
+    QAction* switchSection;
+    QAction* lockSection;
+
+    QAction* hertz; ///< checkable: Hz rather than rad/s
+    QAction* nextCase;
+    QAction* previousCase;
+    QAction* wholePane;
+    QAction* allPanes;
+
+    QAction* keepTrial;
+    QAction* showTrials;
+    QAction* showHandover;
+
+    QAction* about;
+
+    /// Enables and names undo and redo.
+    void setUndo(bool can, const QString& what);
+    void setRedo(bool can, const QString& what);
+
+  private:
+    QAction* make(const QString& text, const QKeySequence& keys, const QString& tip);
+
+    QWidget* window_;
+};
+
+} // namespace cornerwright
