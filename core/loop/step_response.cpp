@@ -3,6 +3,7 @@
 #include "core/loop/closed_loop_poles.h"
 #include "core/loop/delayed_step.h"
 #include "core/loop/rational_step.h"
+#include "core/loop/sampled_step.h"
 #include "core/loop/step_drawing.h"
 #include "core/numerics/number_text.h"
 
@@ -53,6 +54,18 @@ DelayedLoop delayed(const DesignLoop& loop, const PlantModel& plant) {
 constexpr const char* no_history =
     "the response behind the dead time could not be followed until it settles";
 
+SampledLoop sampled(const RealisedLoop& loop, const PlantModel& plant) {
+    return {roots_in_z_minus_1(loop.compensator), plant, loop.computation_delay_s,
+            loop.compensator.sample_period_s};
+}
+
+/// Of a measured plant no poles in z are handed over: those of its fit serve.
+ComplexVector poles_through_fit(const RealisedLoop& loop, const PlantModel& plant) {
+    return closed_loop_poles(RealisedLoop{loop.compensator, plant, loop.computation_delay_s}).poles;
+}
+
+constexpr const char* no_samples = "the sampled response could not be followed until it settles";
+
 } // namespace
 
 TimeAssessment assess_time(const DesignLoop& loop, const FigureRequest& request,
@@ -79,6 +92,30 @@ StepCurves step_curves(const DesignLoop& loop, double until_s, int points) {
             : delayed_step(with_delay, {until_s});
     if (!signals)
         return {{}, {}, {}, {}, no_history};
+    StepCurves curves = curves_at(*signals, even_times(until_s, points));
+    curves.note = plant.note;
+    return curves;
+}
+
+TimeAssessment assess_time(const RealisedLoop& loop, const FigureRequest& request,
+                           const ComplexVector& closed_loop_poles_z) {
+    const TimePlant plant = time_plant(loop.plant);
+    if (plant.model == nullptr)
+        return without(request, no_fit);
+    const std::optional<StepSignals> signals = sampled_step(
+        sampled(loop, *plant.model),
+        closed_loop_poles_z.empty() ? poles_through_fit(loop, *plant.model) : closed_loop_poles_z);
+    return signals ? assessed(*signals, request, plant.note) : without(request, no_samples);
+}
+
+StepCurves step_curves(const RealisedLoop& loop, double until_s, int points) {
+    const TimePlant plant = time_plant(loop.plant);
+    if (plant.model == nullptr)
+        return {{}, {}, {}, {}, no_fit};
+    const std::optional<StepSignals> signals =
+        sampled_step(sampled(loop, *plant.model), poles_through_fit(loop, *plant.model), until_s);
+    if (!signals)
+        return {{}, {}, {}, {}, no_samples};
     StepCurves curves = curves_at(*signals, even_times(until_s, points));
     curves.note = plant.note;
     return curves;

@@ -1,0 +1,152 @@
+#include "core/loop/held_plant.h"
+
+#include "core/numerics/compensated.h"
+
+#include <Eigen/Dense>
+
+#include <algorithm>
+#include <cmath>
+#include <unsupported/Eigen/MatrixFunctions>
+
+namespace cornerwright {
+namespace {
+
+constexpr double least_points = 8.0; // a period, by the contract
+constexpr double resolved = 0.6;     // time constants of a live mode between points
+constexpr double dead = 1e-3;        // part of a mode that no cubic needs to follow
+
+std::vector<double> points_of_period(const ComplexVector& poles, double period,
+                                     std::vector<double> switches) {
+    std::sort(switches.begin(), switches.end());
+    switches.push_back(period);
+    std::vector<double> points{0.0};
+    double last_switch = 0.0;
+    for (const double next_switch : switches) {
+        while (points.back() < next_switch) {
+            double longest = period / least_points;
+            for (const Complex& pole : poles) {
+                const double since = points.back() - last_switch;
+                if (std::exp(std::min(0.0, pole.real()) * since) > dead)
+                    longest = std::min(longest, resolved / std::abs(pole));
+            }
+            const double left = next_switch - points.back();
+            // Two even parts rather than a whole one and a splinter.
+            const double step = left <= longest ? left : std::min(longest, 0.5 * left);
+            points.push_back(step == left ? next_switch : points.back() + step);
+        }
+        last_switch = next_switch;
+    }
+    return points;
+}
+
+} // namespace
+
+ComplexVector BlockChain::rate(const ComplexVector& state, double v) const {
+    ComplexVector result(order);
+    for (std::size_t i = 0; i < order; ++i) {
+        result[i] = input[i] * v;
+        for (std::size_t k = 0; k <= i; ++k)
+            result[i] += times(matrix[i * order + k], state[k]);
+    }
+    return result;
+}
+
+double BlockChain::out(const ComplexVector& state, double v) const {
+    double sum = direct * v;
+    for (std::size_t i = 0; i < order; ++i)
+        sum += output[i].real() * state[i].real() - output[i].imag() * state[i].imag();
+    return sum;
+}
+
+BlockChain block_chain(const RootForm& form) {
+    BlockChain chain;
+    const std::size_t order = chain.order = form.poles.size();
+    chain.matrix.resize(order * order);
+    chain.input.resize(order);
+    ComplexVector zeros = form.zeros;
+    ComplexVector row(order); // what the blocks so far give out, on their states
+    Complex direct = 1.0;
+    double gain = form.gain;
+    for (std::size_t i = 0; i < order; ++i) {
+        const Complex pole = form.poles[i];
+        const bool has_zero = !zeros.empty();
+        Complex coupling = 0.0;
+        if (has_zero) {
+            const auto nearest =
+                std::min_element(zeros.begin(), zeros.end(), [&](Complex a, Complex b) {
+                    return std::abs(a - pole) < std::abs(b - pole);
+                });
+            coupling = pole - *nearest;
+            zeros.erase(nearest);
+        }
+        const double size = has_zero ? std::abs(coupling) : std::abs(pole);
+        const double scale = size > 0.0 ? size : 1.0;
+        for (std::size_t k = 0; k < i; ++k)
+            chain.matrix[i * order + k] = scale * row[k];
+        chain.input[i] = scale * direct;
+        chain.matrix[i * order + i] = pole;
+        if (has_zero) {
+            row[i] = coupling / scale;
+        } else {
+            std::fill(row.begin(), row.end(), Complex(0.0));
+            row[i] = 1.0;
+            direct = 0.0;
+            gain /= scale;
+        }
+    }
+    chain.output = row;
+    for (Complex& entry : chain.output)
+        entry *= gain;
+    chain.direct = gain * direct.real();
+    return chain;
+}
+
+HeldPlant::HeldPlant(const RootForm& plant, double period_s, std::vector<double> switches_s)
+    : chain_(block_chain(plant)) {
+    const std::vector<double> points = points_of_period(plant.poles, period_s, switches_s);
+    for (std::size_t i = 0; i + 1 < points.size(); ++i) {
+        const bool may_jump = i == 0 || std::find(switches_s.begin(), switches_s.end(),
+                                                  points[i]) != switches_s.end();
+        const double length = points[i + 1] - points[i];
+        pieces_.push_back({points[i], length, may_jump, step_of(length)});
+    }
+}
+
+std::size_t HeldPlant::step_of(double length_s) {
+    constexpr double rounding = 1e-12; // pieces that differ by it are one length
+    for (std::size_t i = 0; i < steps_.size(); ++i)
+        if (std::abs(steps_[i].length_s - length_s) <= rounding * length_s)
+            return i;
+    const auto order = static_cast<Eigen::Index>(chain_.order);
+    // The held input as a state that does not move.
+    Eigen::MatrixXcd matrix = Eigen::MatrixXcd::Zero(order + 1, order + 1);
+    for (Eigen::Index i = 0; i < order; ++i) {
+        matrix(i + 1, 0) = chain_.input[static_cast<std::size_t>(i)];
+        for (Eigen::Index k = 0; k < order; ++k)
+            matrix(i + 1, k + 1) = chain_.matrix[static_cast<std::size_t>(i * order + k)];
+    }
+    const Eigen::MatrixXcd exponential = (matrix * length_s).exp();
+    Step step;
+    step.length_s = length_s;
+    for (Eigen::Index i = 0; i < order; ++i) {
+        step.input.push_back(exponential(i + 1, 0));
+        for (Eigen::Index k = 0; k < order; ++k)
+            step.matrix.push_back(exponential(i + 1, k + 1));
+    }
+    steps_.push_back(std::move(step));
+    return steps_.size() - 1;
+}
+
+void HeldPlant::advance(const Piece& piece, double input, ComplexVector& state) const {
+    const Step& step = steps_[piece.step];
+    const std::size_t order = chain_.order;
+    // Lower triangular: from the last state up, none is needed once it is overwritten.
+    for (std::size_t i = order; i-- > 0;) {
+        Complex sum = step.input[i] * input;
+        for (std::size_t k = 0; k <= i; ++k)
+            sum += times(step.matrix[i * order + k], state[k]);
+        state[i] = sum;
+    }
+}
+
+} // namespace cornerwright

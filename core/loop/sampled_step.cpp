@@ -1,0 +1,237 @@
+#include "core/loop/sampled_step.h"
+
+#include "core/loop/held_plant.h"
+#include "core/loop/sampled_plant.h"
+#include "core/loop/steady_values.h"
+
+#include <algorithm>
+#include <cmath>
+
+namespace cornerwright {
+namespace {
+
+constexpr double agreement = 1e-5; // of the size, between simulation and tail
+constexpr double slow_turn = 0.3;  // rad or time constants in a sample: the tail is smooth then
+constexpr std::size_t first_check = 48; // samples
+constexpr std::size_t most_pieces = 4000000;
+
+/// A delay counted from the start of a sample.
+struct Offset {
+    std::size_t samples = 0;
+    double rest_s = 0.0; ///< [0, period)
+};
+
+Offset offset_of(double delay_s, double period_s) {
+    constexpr double rounding = 1e-12;
+    const double ratio = delay_s / period_s;
+    double whole = std::floor(ratio);
+    if (ratio - whole > 1.0 - rounding * std::max(1.0, ratio))
+        whole += 1.0;
+    double rest = std::max(0.0, delay_s - whole * period_s);
+    if (rest <= rounding * std::max(1.0, ratio) * period_s)
+        rest = 0.0;
+    return {static_cast<std::size_t>(whole), rest};
+}
+
+/// One of the two steps, sample by sample.
+class Run {
+  public:
+    Run(const HeldPlant& plant, const BlockChain& compensator, double period_s, Offset control,
+        Offset dead_time, double reference, double disturbance)
+        : plant_(plant),
+          compensator_(compensator),
+          period_s_(period_s),
+          control_(control),
+          dead_time_(dead_time),
+          reference_(reference),
+          disturbance_(disturbance),
+          plant_state_(plant.chain().order),
+          compensator_state_(compensator.order),
+          past_(control.samples + 2, 0.0) {}
+
+    /// One sample: measures, computes, and follows the plant to the next.
+    void step(JoinedPoints* control_points, JoinedPoints& y) {
+        const double start = static_cast<double>(sample_) * period_s_;
+        compute();
+        if (control_points != nullptr) {
+            if (sample_ > 0)
+                control_points->append(start, control(1), 0.0);
+            control_points->append(start, control(0), 0.0);
+        }
+        for (const HeldPlant::Piece& piece : plant_.pieces()) {
+            const double input = plant_input(piece.begin_s);
+            if (piece.may_jump)
+                append(start + piece.begin_s, input, y);
+            plant_.advance(piece, input, plant_state_);
+            append(start + piece.begin_s + piece.length_s, input, y);
+        }
+        ++sample_;
+    }
+
+  private:
+    /// u so many samples ago.
+    double control(std::size_t ago) const {
+        return ago > sample_ ? 0.0 : past_[(sample_ - ago) % past_.size()];
+    }
+
+    double disturbance_at(double offset_s) const {
+        const bool acts = sample_ > dead_time_.samples ||
+                          (sample_ == dead_time_.samples && offset_s >= dead_time_.rest_s);
+        return acts ? disturbance_ : 0.0;
+    }
+
+    double plant_input(double offset_s) const {
+        return control(control_.samples + (offset_s < control_.rest_s ? 1 : 0)) +
+               disturbance_at(offset_s);
+    }
+
+    /// The new u from y just after the instant, which a plant with a direct term and no delay lets
+    /// depend on u itself.
+    void compute() {
+        double& now = past_[sample_ % past_.size()];
+        now = 0.0;
+        const double y_before = plant_.chain().out(plant_state_, plant_input(0.0));
+        const bool immediate = control_.samples == 0 && control_.rest_s == 0.0;
+        const double through = immediate ? plant_.chain().direct : 0.0;
+        now = compensator_.out(compensator_state_, reference_ - y_before) /
+              (1.0 + compensator_.direct * through);
+        const double error = reference_ - y_before - through * now;
+        const ComplexVector change = compensator_.rate(compensator_state_, error);
+        for (std::size_t i = 0; i < change.size(); ++i)
+            compensator_state_[i] += change[i];
+    }
+
+    void append(double t, double input, JoinedPoints& y) const {
+        const BlockChain& chain = plant_.chain();
+        const double slope = chain.out(chain.rate(plant_state_, input), 0.0);
+        y.append(t, chain.out(plant_state_, input), slope);
+    }
+
+    const HeldPlant& plant_;
+    const BlockChain& compensator_;
+    double period_s_;
+    Offset control_;
+    Offset dead_time_;
+    double reference_;
+    double disturbance_;
+    ComplexVector plant_state_;
+    ComplexVector compensator_state_;
+    std::vector<double> past_;
+    std::size_t sample_ = 0;
+};
+
+/// What the closed-loop poles make of the signals at the sampling instants.
+struct Tail {
+    ModalSum y, u, y_disturbance;
+};
+
+/// Residues of T, C S and P S times z/(z - 1), with L = -1 and L' = -q at a pole, as modes in time
+/// (z^k = exp(rate t)). Modes that are spent after `samples` are left out; nothing where one of the
+/// others still turns too fast for a smooth curve through the instants.
+std::optional<Tail> tail_of(const SampledLoop& loop, const ComplexVector& poles_z,
+                            const SampledPlant& plant, const SampledPlant& undelayed,
+                            const SteadyValues& steady, std::size_t samples) {
+    const RootForm open = loop.compensator * plant.delta_form;
+    constexpr double spent = 1e-9;
+    Tail tail;
+    tail.y.modes.push_back({0.0, {steady.y}});
+    tail.u.modes.push_back({0.0, {steady.u}});
+    tail.y_disturbance.modes.push_back({0.0, {steady.y_disturbance}});
+    for (const Complex& z : poles_z) {
+        if (z.imag() < 0.0 ||
+            static_cast<double>(samples) * std::log(std::abs(z)) < std::log(spent))
+            continue;
+        const Complex turn = std::log(z);
+        if (std::abs(turn) > slow_turn)
+            return std::nullopt;
+        const Complex d = z - 1.0;
+        Complex q = -static_cast<double>(plant.whole_samples) / z;
+        for (const Complex& zero : open.zeros)
+            q += 1.0 / (d - zero);
+        for (const Complex& pole : open.poles)
+            q -= 1.0 / (d - pole);
+        const Complex rate = turn / loop.sample_period_s;
+        const Complex weight = (z.imag() > 0.0 ? 2.0 : 1.0) / (d * q);
+        if (!std::isfinite(weight.real()) || !std::isfinite(weight.imag()))
+            return std::nullopt;
+        tail.y.modes.push_back({rate, {weight}});
+        tail.u.modes.push_back({rate, {-weight * evaluate(loop.compensator, d)}});
+        tail.y_disturbance.modes.push_back({rate, {-weight * evaluate(undelayed, d)}});
+    }
+    return tail;
+}
+
+/// The largest difference at the sampling instants from `from` on, of the points' size.
+double disagreement(const JoinedPoints& points, double from, double period_s, const ModalSum& sum) {
+    double size = 1e-300;
+    double largest = 0.0;
+    for (std::size_t i = points.t_s.size(); i-- > 0;) {
+        const double t = points.t_s[i];
+        size = std::max(size, std::abs(points.value[i]));
+        const double in_periods = t / period_s;
+        const bool at_instant = std::abs(in_periods - std::round(in_periods)) < 1e-9;
+        const bool last_of_twins = i + 1 == points.t_s.size() || points.t_s[i + 1] > t;
+        if (t >= from && at_instant && last_of_twins)
+            largest = std::max(largest, std::abs(points.value[i] - sum.value(t)));
+    }
+    return largest / size;
+}
+
+ModalSum constant(double value) {
+    return {{{0.0, {value}}}};
+}
+
+} // namespace
+
+std::optional<StepSignals> sampled_step(const SampledLoop& loop, const ComplexVector& poles_z,
+                                        double until_s) {
+    const double period = loop.sample_period_s;
+    const double dead_time_s = loop.plant.dead_time_s;
+    const Offset control = offset_of(dead_time_s + loop.computation_delay_s, period);
+    const Offset dead_time = offset_of(dead_time_s, period);
+    const HeldPlant plant(loop.plant.roots, period, {control.rest_s, dead_time.rest_s});
+    const BlockChain compensator = block_chain(loop.compensator);
+    Run reference(plant, compensator, period, control, dead_time, 1.0, 0.0);
+    Run disturbance(plant, compensator, period, control, dead_time, 0.0, 1.0);
+
+    const SampledPlant sampled = sample_plant(loop.plant, loop.computation_delay_s, period);
+    const SampledPlant undelayed = sample_plant(loop.plant, 0.0, period);
+    const SteadyValues steady = steady_values(loop.compensator, undelayed.delta_form);
+
+    StepSignals signals;
+    std::size_t samples = 0;
+    for (std::size_t check = first_check;; check += check / 2) {
+        for (; samples < check; ++samples) {
+            reference.step(&signals.u.points, signals.y.points);
+            disturbance.step(nullptr, signals.y_disturbance.points);
+        }
+        const double end = static_cast<double>(samples) * period;
+        const double from = 0.75 * end;
+        const auto agree = [&](const Tail& with) {
+            return disagreement(signals.y.points, from, period, with.y) < agreement &&
+                   disagreement(signals.u.points, from, period, with.u) < agreement &&
+                   disagreement(signals.y_disturbance.points, from, period, with.y_disturbance) <
+                       agreement;
+        };
+        const Tail still{constant(steady.y), constant(steady.u), constant(steady.y_disturbance)};
+        const bool settled = steady.finite && agree(still);
+        std::optional<Tail> slow;
+        if (!settled && steady.finite)
+            slow = tail_of(loop, poles_z, sampled, undelayed, steady, 3 * samples / 4);
+        const bool told = settled || (slow && agree(*slow));
+        const bool worn_out = samples * plant.pieces().size() > most_pieces;
+        if (!told && !worn_out && (until_s == 0.0 || end < until_s))
+            continue;
+        if (!told && (until_s == 0.0 || end < until_s))
+            return std::nullopt;
+        const Tail& rest = told && !settled ? *slow : still;
+        signals.y.tail = rest.y;
+        signals.u.tail = rest.u;
+        signals.y_disturbance.tail = rest.y_disturbance;
+        for (StepSignal* signal : {&signals.y, &signals.u, &signals.y_disturbance})
+            signal->tail_from = end;
+        return signals;
+    }
+}
+
+} // namespace cornerwright
