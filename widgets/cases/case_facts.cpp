@@ -12,8 +12,8 @@ namespace cornerwright {
 
 namespace {
 
-QString tr(const char* text, int number = -1) {
-    return QCoreApplication::translate("PlantCases", text, nullptr, number);
+QString tr(const char* text) {
+    return QCoreApplication::translate("PlantCases", text);
 }
 
 const QString separator = QStringLiteral(" · ");
@@ -22,7 +22,7 @@ QString measurementFact(const MeasurementSource& source) {
     if (!source.response) {
         return tr("%1 could not be loaded").arg(QString::fromStdString(source.file));
     }
-    QStringList facts{tr("%n points", static_cast<int>(source.response->w_rad_s.size()))};
+    QStringList facts{tr("%1 points").arg(source.response->w_rad_s.size())};
     const std::vector<double>& coherence = source.response->coherence;
     if (!coherence.empty()) {
         facts << tr("coherence ≥ %1").arg(fixedText(*std::ranges::min_element(coherence), 2));
@@ -66,7 +66,14 @@ QString bindingFact(const Verdict& verdict, const std::string& caseName) {
         std::ranges::count_if(verdict.requirements, [&caseName](const RequirementResult& result) {
             return result.worst.state == State::unmet && result.worst.case_name == caseName;
         });
-    return binds == 0 ? QString() : tr("binds %n requirements", static_cast<int>(binds));
+    switch (binds) {
+    case 0:
+        return {};
+    case 1:
+        return tr("binds 1 requirement");
+    default:
+        return tr("binds %1 requirements").arg(binds);
+    }
 }
 
 QStringList shownCaseFacts(const Project& project, const PlantCase& plantCase,

@@ -96,14 +96,20 @@ void LedgerPanel::buildView() {
 void LedgerPanel::fitColumns() {
     // In average characters, so that the columns follow the font and the scale.
     constexpr std::pair<int, int> widths[] = {
-        {LedgerModel::mark, 4},   {LedgerModel::measure, 26},  {LedgerModel::limit, 18},
-        {LedgerModel::worst, 13}, {LedgerModel::headroom, 26}, {LedgerModel::distance, 17},
-        {LedgerModel::state, 18},
+        {LedgerModel::mark, 4},   {LedgerModel::measure, 22},  {LedgerModel::limit, 13},
+        {LedgerModel::worst, 11}, {LedgerModel::headroom, 24}, {LedgerModel::distance, 13},
+        {LedgerModel::state, 14},
     };
     const QFontMetrics metrics(fontOf(FontRole::strong));
     for (const auto& [column, characters] : widths) {
         view_->setColumnWidth(column, characters * metrics.averageCharWidth());
     }
+    const QString muted = Theme::of(palette()).colour(ColourRole::muted).name();
+    view_->horizontalHeader()->setStyleSheet(
+        QStringLiteral("QHeaderView { background: transparent; border: none; }"
+                       "QHeaderView::section { background: transparent; border: none;"
+                       " padding: 1px 6px; color: %1; }")
+            .arg(muted));
     view_->verticalHeader()->setDefaultSectionSize(metrics.height() + 6);
     view_->verticalHeader()->setSectionResizeMode(QHeaderView::Fixed);
 }
@@ -202,7 +208,8 @@ bool LedgerPanel::eventFilter(QObject* watched, QEvent* event) {
             break;
         }
     }
-    if (event->type() == QEvent::ApplicationFontChange || event->type() == QEvent::FontChange) {
+    if (event->type() == QEvent::ApplicationFontChange || event->type() == QEvent::FontChange ||
+        event->type() == QEvent::ApplicationPaletteChange) {
         fitColumns();
     }
     return PanelFrame::eventFilter(watched, event);

@@ -5,6 +5,7 @@
 #include "widgets/chain/chain_panel.h"
 #include "widgets/figure_text.h"
 #include "widgets/ledger/ledger_panel.h"
+#include "widgets/trials/trial_menu.h"
 #include "widgets/window/about_page.h"
 #include "widgets/window/file_flow.h"
 #include "widgets/window/notice_strip.h"
@@ -57,6 +58,7 @@ MainWindow::MainWindow(const Places& places, QWidget* parent)
     connectSectionActions();
     connectDocument();
     connectPanes();
+    connectTrials();
     showHistory();
     showCases();
     resize(firstSize);
@@ -73,7 +75,7 @@ void MainWindow::build() {
     cases_ = new CasesPanel(document_, viewState_, this);
     ledger_ = new LedgerPanel(document_, viewState_, this);
     area_ = new WorkArea(chain_, cases_, ledger_, this);
-    makePanes(*area_, viewState_);
+    makePanes(*area_, viewState_, trials_);
     auto* about = new AboutPage(this);
     status_ = new RunStatus(this);
     pages_ = new QStackedWidget(this);
@@ -184,6 +186,26 @@ void MainWindow::connectPanes() {
                     document_.apply(*proposed, what);
                 });
     }
+}
+
+void MainWindow::connectTrials() {
+    followTrials(*bar_->trialMenu(), trials_);
+    connect(actions_->keepTrial, &QAction::triggered, this, [this] {
+        const PaneContent& content = live_.content();
+        if (content.assessment) {
+            trials_.keep(content.project, content.assessment);
+        }
+    });
+    connect(actions_->showTrials, &QAction::triggered, this,
+            [this] { area_->reveal(QStringLiteral("trials"), WorkArea::lower_right); });
+    connect(actions_->showHandover, &QAction::triggered, this,
+            [this] { area_->reveal(QStringLiteral("handover"), WorkArea::lower_right); });
+    connect(&document_, &Document::projectReplaced, &trials_, &TrialBook::clear);
+    connect(&trials_, &TrialBook::changed, this, [this] {
+        const Trial* trial = trials_.comparedTrial();
+        bar_->setTrialName(trial == nullptr ? QString() : trial->name);
+        live_.setTrial(trial == nullptr ? nullptr : trial->assessment);
+    });
 }
 
 void MainWindow::showContent() {

@@ -2,6 +2,7 @@
 
 #include "widgets/document/document.h"
 #include "widgets/document/live_content.h"
+#include "widgets/trials/trial_book.h"
 #include "widgets/view_state.h"
 
 #include <QMainWindow>
@@ -41,6 +42,7 @@ class MainWindow : public QMainWindow {
     Document& document() { return document_; }
     ViewState& viewState() { return viewState_; }
     LiveContent& live() { return live_; }
+    TrialBook& trials() { return trials_; }
     FileFlow& files() { return *files_; }
     WorkArea& area() { return *area_; }
     ChainPanel& chain() { return *chain_; }
@@ -61,6 +63,7 @@ class MainWindow : public QMainWindow {
     void connectSectionActions();
     void connectDocument();
     void connectPanes();
+    void connectTrials();
     void showContent();
     void showHistory();
     void showCases();
@@ -73,6 +76,7 @@ class MainWindow : public QMainWindow {
     Document document_;
     ViewState viewState_;
     LiveContent live_;
+    TrialBook trials_;
     WindowActions* actions_;
     TopBar* bar_;
     NoticeStrip* notices_;

@@ -1,15 +1,19 @@
 #include "widgets/window/pane_set.h"
 
+#include "widgets/handover/realisation_pane.h"
 #include "widgets/panes/magnitude_pane.h"
 #include "widgets/panes/phase_pane.h"
+#include "widgets/trials/trials_pane.h"
 #include "widgets/window/work_area.h"
 
 namespace cornerwright {
 
-void makePanes(WorkArea& area, ViewState& viewState) {
+void makePanes(WorkArea& area, ViewState& viewState, TrialBook& trials) {
     // The first four stand in the four places of a fresh window.
     area.addPane(QStringLiteral("magnitude"), new MagnitudePane(viewState, &area));
     area.addPane(QStringLiteral("phase"), new PhasePane(viewState, &area));
+    area.addPane(QStringLiteral("handover"), new RealisationPane(viewState, &area));
+    area.addPane(QStringLiteral("trials"), new TrialsPane(viewState, trials, &area));
 }
 
 } // namespace cornerwright

@@ -74,6 +74,11 @@ void fillMenus(MainWindow& window) {
     addPlaces(*view, window.area());
     view->addActions({actions.wholePane, actions.allPanes});
 
+    QMenu* design = bar->addMenu(MainWindow::tr("&Design"));
+    design->addActions({actions.keepTrial, actions.showTrials});
+    design->addSeparator();
+    design->addAction(actions.showHandover);
+
     QMenu* help = bar->addMenu(MainWindow::tr("&Help"));
     help->addAction(actions.about);
 }

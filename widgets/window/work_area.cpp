@@ -24,11 +24,11 @@ QSplitter* makeSplitter(Qt::Orientation orientation, const QString& name, QWidge
 }
 
 // Shares of the room, as long as nobody has moved a splitter: what is looked at most while dragging
-// stands widest.
-void setShares(QSplitter* splitter, const std::array<int, 2>& shares) {
-    splitter->setSizes({shares[0], shares[1]});
-    splitter->setStretchFactor(0, shares[0]);
-    splitter->setStretchFactor(1, shares[1]);
+// stands widest. Later room is shared out the same way, but the left column keeps its width.
+void setShares(QSplitter* splitter, int first, int second) {
+    const int room =
+        splitter->orientation() == Qt::Horizontal ? splitter->width() : splitter->height();
+    splitter->setSizes({room * first / (first + second), room * second / (first + second)});
 }
 
 } // namespace
@@ -56,12 +56,22 @@ WorkArea::WorkArea(QWidget* chain, QWidget* cases, QWidget* ledger, QWidget* par
         connect(slots_[place], &PaneSlot::wholeAsked, this,
                 [this, place] { setWhole(whole_ == slots_[place] ? nullptr : slots_[place]); });
     }
-    setShares(columns_, {17, 83});
-    setShares(left_, {64, 36});
-    setShares(right_, {68, 32});
-    setShares(panesRow_, {61, 39});
-    setShares(centre_, {55, 45});
-    setShares(side_, {51, 49});
+    columns_->setStretchFactor(0, 0);
+    columns_->setStretchFactor(1, 1);
+}
+
+void WorkArea::showEvent(QShowEvent* event) {
+    QWidget::showEvent(event);
+    if (std::exchange(arranged_, true)) {
+        return;
+    }
+    layout()->activate();
+    setShares(columns_, 17, 83);
+    setShares(right_, 70, 30);
+    setShares(panesRow_, 61, 39);
+    setShares(left_, 64, 36);
+    setShares(centre_, 55, 45);
+    setShares(side_, 51, 49);
 }
 
 void WorkArea::addPane(const QString& key, Pane* pane) {
@@ -175,8 +185,9 @@ void WorkArea::save(QSettings& settings) const {
 
 void WorkArea::restore(const QSettings& settings) {
     for (QSplitter* splitter : {columns_, left_, right_, panesRow_, centre_, side_}) {
-        splitter->restoreState(
-            settings.value(QStringLiteral("splitters/") + splitter->objectName()).toByteArray());
+        const QByteArray state =
+            settings.value(QStringLiteral("splitters/") + splitter->objectName()).toByteArray();
+        arranged_ = splitter->restoreState(state) || arranged_;
         splitter->setChildrenCollapsible(false);
         splitter->setHandleWidth(gap);
     }

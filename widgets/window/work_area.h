@@ -47,6 +47,9 @@ class WorkArea : public QWidget {
     void save(QSettings& settings) const;
     void restore(const QSettings& settings);
 
+  protected:
+    void showEvent(QShowEvent* event) override;
+
   private:
     void fillMenu(QMenu* menu, Place place);
     void setWholeFrom(QWidget* widget, QSplitter* splitter);
@@ -60,6 +63,7 @@ class WorkArea : public QWidget {
     std::array<PaneSlot*, placeCount_> slots_{};
     std::vector<std::pair<QString, Pane*>> panes_;
     QWidget* whole_ = nullptr;
+    bool arranged_ = false; ///< the splitters have their sizes
     PaneContent content_;
 };
 
