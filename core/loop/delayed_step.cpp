@@ -1,5 +1,6 @@
 #include "core/loop/delayed_step.h"
 
+#include "core/loop/common_roots.h"
 #include "core/loop/history_stepper.h"
 #include "core/loop/steady_values.h"
 #include "core/numerics/delayed_sum.h"
@@ -94,32 +95,9 @@ Complex logarithmic_slope(const RootForm& form, Complex s) {
     return sum;
 }
 
-/// Takes roots that stand in numerator and denominator out of both and returns them.
-ComplexVector take_common(RootForm& form) {
-    ComplexVector common;
-    for (std::size_t i = form.zeros.size(); i-- > 0;) {
-        const auto pole = std::find(form.poles.begin(), form.poles.end(), form.zeros[i]);
-        if (pole == form.poles.end())
-            continue;
-        common.push_back(*pole);
-        form.poles.erase(pole);
-        form.zeros.erase(form.zeros.begin() + static_cast<std::ptrdiff_t>(i));
-    }
-    return common;
-}
-
-/// Residue of `form` at one of its poles; 0 where it has none there.
-Complex residue_at(RootForm form, Complex pole) {
-    const auto at = std::find(form.poles.begin(), form.poles.end(), pole);
-    if (at == form.poles.end())
-        return 0.0;
-    form.poles.erase(at);
-    return evaluate(form, pole);
-}
-
 std::optional<Tail> tail_of(const DelayedLoop& loop, const SteadyValues& steady) {
     RootForm open = loop.compensator * loop.plant;
-    const ComplexVector common = take_common(open);
+    const ComplexVector common = take_common_roots(open);
     const double delay = loop.delay_s();
     const DelayedSum function{FactoredSum({open.poles}, {open.zeros}, open.gain), delay};
     constexpr double decay = 3.0;
@@ -187,9 +165,12 @@ std::optional<StepSignals> delayed_step(const DelayedLoop& loop, const HistoryLi
 
     StepSignals signals;
     signals.control_has_impulse = loop.compensator.zeros.size() > loop.compensator.poles.size();
-    signals.y.points.append(0.0, 0.0, 0.0);
+    // At rest until the delay is over; there the slope jumps.
+    for (const double t : {0.0, delay})
+        signals.y.points.append(t, 0.0, 0.0);
     if (loop.dead_time_s > 0.0)
-        signals.y_disturbance.points.append(0.0, 0.0, 0.0);
+        for (const double t : {0.0, loop.dead_time_s})
+            signals.y_disturbance.points.append(t, 0.0, 0.0);
     const auto follow = [&](JoinedPoints* control) {
         reference.follow(delay, control, signals.y.points);
         disturbance.follow(loop.dead_time_s, nullptr, signals.y_disturbance.points);

@@ -1,5 +1,6 @@
 #include "core/loop/modal_sum.h"
 
+#include "core/loop/common_roots.h"
 #include "core/numerics/double_double.h"
 
 #include <algorithm>
@@ -51,22 +52,34 @@ WideComplex wide_residue(const RootForm& form, const ComplexVector& outside, Com
 }
 
 /// Offsets of the crowd from its centre. Poles that coincide are put on a small circle: the product
-/// of m factors changes by the m-th power of its radius alone, far below double precision.
+/// of m factors changes by the m-th power of its radius alone, the residues grow as its power
+/// 1 - m; the radius balances the two at 32 digits.
 std::vector<WideComplex> offsets_of(const ComplexVector& members, Complex centre, double scale) {
     const std::size_t count = members.size();
-    const double radius = (count <= 3 ? 1e-7 : 1e-4) * scale;
+    constexpr double coincident = 3e-8; // of the scale: its square is below double precision
+    constexpr double nudge = 1e-7;      // parts pairs within a wider crowd
+    constexpr double precision = 1e-32;
+    double spread = 0.0;
     double closest = HUGE_VAL;
-    for (std::size_t i = 0; i < count; ++i)
+    for (std::size_t i = 0; i < count; ++i) {
+        spread = std::max(spread, std::abs(members[i] - centre));
         for (std::size_t j = 0; j < i; ++j)
             closest = std::min(closest, std::abs(members[i] - members[j]));
+    }
+    const bool one_place = spread <= coincident * scale;
+    double radius = 0.0;
+    if (one_place)
+        radius = scale * std::pow(precision, 1.0 / (2.0 * static_cast<double>(count) - 1.0));
+    else if (closest <= coincident * scale)
+        radius = nudge * scale;
     std::vector<WideComplex> offsets;
     for (std::size_t i = 0; i < count; ++i) {
-        if (closest < radius)
-            offsets.emplace_back(
-                std::polar(radius, std::numbers::pi * (2.0 * static_cast<double>(i) + 1.0) /
-                                       static_cast<double>(count)));
-        else
-            offsets.emplace_back(WideComplex(members[i]) - WideComplex(centre));
+        const Complex on_circle =
+            std::polar(radius, std::numbers::pi * (2.0 * static_cast<double>(i) + 1.0) /
+                                   static_cast<double>(count));
+        const WideComplex own =
+            one_place ? WideComplex() : WideComplex(members[i]) - WideComplex(centre);
+        offsets.push_back(own + WideComplex(on_circle));
     }
     return offsets;
 }
@@ -103,16 +116,6 @@ Mode crowd_mode(const RootForm& form, const ComplexVector& members, const Comple
     return mode;
 }
 
-void cancel_common(RootForm& form) {
-    for (std::size_t i = form.zeros.size(); i-- > 0;) {
-        const auto pole = std::find(form.poles.begin(), form.poles.end(), form.zeros[i]);
-        if (pole == form.poles.end())
-            continue;
-        form.poles.erase(pole);
-        form.zeros.erase(form.zeros.begin() + static_cast<std::ptrdiff_t>(i));
-    }
-}
-
 double smallest_size(const ComplexVector& poles) {
     double smallest = HUGE_VAL;
     for (const Complex& pole : poles)
@@ -145,7 +148,7 @@ Complex turning(Complex rate, double t) {
 
 ModalSum modal_sum(const RootForm& given) {
     RootForm form = given;
-    cancel_common(form);
+    take_common_roots(form);
     ModalSum sum;
     std::vector<bool> taken(form.poles.size(), false);
     for (std::size_t i = 0; i < form.poles.size(); ++i) {

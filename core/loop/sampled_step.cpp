@@ -1,5 +1,6 @@
 #include "core/loop/sampled_step.h"
 
+#include "core/loop/common_roots.h"
 #include "core/loop/held_plant.h"
 #include "core/loop/sampled_plant.h"
 #include "core/loop/steady_values.h"
@@ -125,38 +126,96 @@ struct Tail {
     ModalSum y, u, y_disturbance;
 };
 
-/// Residues of T, C S and P S times z/(z - 1), with L = -1 and L' = -q at a pole, as modes in time
-/// (z^k = exp(rate t)). Modes that are spent after `samples` are left out; nothing where one of the
-/// others still turns too fast for a smooth curve through the instants.
-std::optional<Tail> tail_of(const SampledLoop& loop, const ComplexVector& poles_z,
-                            const SampledPlant& plant, const SampledPlant& undelayed,
-                            const SteadyValues& steady, std::size_t samples) {
-    const RootForm open = loop.compensator * plant.delta_form;
-    constexpr double spent = 1e-9;
-    Tail tail;
-    tail.y.modes.push_back({0.0, {steady.y}});
-    tail.u.modes.push_back({0.0, {steady.u}});
-    tail.y_disturbance.modes.push_back({0.0, {steady.y_disturbance}});
+double size_of(const StepSignal& signal) {
+    double size = 0.0;
+    for (const double value : signal.points.value)
+        size = std::max(size, std::abs(value));
+    return size;
+}
+
+/// Residues of T, C S and P S times z/(z - 1) at the closed-loop poles, with L = -1 and L' = -q
+/// there, as modes in time (z^k = exp(rate t)).
+class TailModes {
+  public:
+    TailModes(const SampledLoop& loop, const ComplexVector& poles_z, const SteadyValues& steady);
+
+    /// The modes that still count after so many samples of these signals; nothing where one of them
+    /// turns too fast for a smooth curve through the sampling instants.
+    std::optional<Tail> after(std::size_t samples, const StepSignals& signals) const;
+
+  private:
+    struct Entry {
+        Complex turn; ///< ln z
+        Complex y, u, y_disturbance;
+    };
+    double period_s_;
+    SteadyValues steady_;
+    std::vector<Entry> entries_;
+};
+
+TailModes::TailModes(const SampledLoop& loop, const ComplexVector& poles_z,
+                     const SteadyValues& steady)
+    : period_s_(loop.sample_period_s), steady_(steady) {
+    const SampledPlant plant = sample_plant(loop.plant, loop.computation_delay_s, period_s_);
+    const SampledPlant undelayed = sample_plant(loop.plant, 0.0, period_s_);
+    RootForm open = loop.compensator * plant.delta_form;
+    const ComplexVector common = take_common_roots(open);
     for (const Complex& z : poles_z) {
-        if (z.imag() < 0.0 ||
-            static_cast<double>(samples) * std::log(std::abs(z)) < std::log(spent))
-            continue;
-        const Complex turn = std::log(z);
-        if (std::abs(turn) > slow_turn)
-            return std::nullopt;
         const Complex d = z - 1.0;
+        const bool cancelled = std::any_of(common.begin(), common.end(), [&](Complex root) {
+            constexpr double rounding = 1e-15; // of z, which d was rounded to
+            return std::abs(root - d) <= rounding;
+        });
+        if (z.imag() < 0.0 || z == 0.0 || cancelled)
+            continue;
         Complex q = -static_cast<double>(plant.whole_samples) / z;
         for (const Complex& zero : open.zeros)
             q += 1.0 / (d - zero);
         for (const Complex& pole : open.poles)
             q -= 1.0 / (d - pole);
-        const Complex rate = turn / loop.sample_period_s;
         const Complex weight = (z.imag() > 0.0 ? 2.0 : 1.0) / (d * q);
-        if (!std::isfinite(weight.real()) || !std::isfinite(weight.imag()))
+        entries_.push_back({std::log(z), weight, -weight * evaluate(loop.compensator, d),
+                            -weight * evaluate(undelayed, d)});
+    }
+    // What one of compensator and plant cancels of the other shows in u or in the answer to the
+    // disturbance alone.
+    for (const Complex& d : common) {
+        const Complex z = 1.0 + d;
+        if (d.imag() < 0.0 || d == 0.0 || z == 0.0)
+            continue;
+        const Complex loop_gain =
+            evaluate(open, d) * std::pow(z, -static_cast<double>(plant.whole_samples));
+        const Complex weight = (d.imag() > 0.0 ? 2.0 : 1.0) / ((1.0 + loop_gain) * d);
+        const Complex late = std::pow(z, -static_cast<double>(undelayed.whole_samples));
+        entries_.push_back({std::log(z), 0.0, weight * residue_at(loop.compensator, d),
+                            weight * late * residue_at(undelayed.delta_form, d)});
+    }
+}
+
+std::optional<Tail> TailModes::after(std::size_t samples, const StepSignals& signals) const {
+    constexpr double spent = 0.1 * agreement; // of a signal's size
+    Tail tail;
+    tail.y.modes.push_back({0.0, {steady_.y}});
+    tail.u.modes.push_back({0.0, {steady_.u}});
+    tail.y_disturbance.modes.push_back({0.0, {steady_.y_disturbance}});
+    const double y_size = size_of(signals.y);
+    const double u_size = size_of(signals.u);
+    const double disturbance_size = size_of(signals.y_disturbance);
+    for (const Entry& entry : entries_) {
+        const double left = std::exp(entry.turn.real() * static_cast<double>(samples));
+        // Not "greater": weights of poles at one place are no numbers until they have died.
+        const bool negligible =
+            left == 0.0 || (std::abs(entry.y) * left < spent * y_size &&
+                            std::abs(entry.u) * left < spent * u_size &&
+                            std::abs(entry.y_disturbance) * left < spent * disturbance_size);
+        if (negligible)
+            continue;
+        if (std::abs(entry.turn) > slow_turn || !std::isfinite(std::abs(entry.y)))
             return std::nullopt;
-        tail.y.modes.push_back({rate, {weight}});
-        tail.u.modes.push_back({rate, {-weight * evaluate(loop.compensator, d)}});
-        tail.y_disturbance.modes.push_back({rate, {-weight * evaluate(undelayed, d)}});
+        const Complex rate = entry.turn / period_s_;
+        tail.y.modes.push_back({rate, {entry.y}});
+        tail.u.modes.push_back({rate, {entry.u}});
+        tail.y_disturbance.modes.push_back({rate, {entry.y_disturbance}});
     }
     return tail;
 }
@@ -194,9 +253,9 @@ std::optional<StepSignals> sampled_step(const SampledLoop& loop, const ComplexVe
     Run reference(plant, compensator, period, control, dead_time, 1.0, 0.0);
     Run disturbance(plant, compensator, period, control, dead_time, 0.0, 1.0);
 
-    const SampledPlant sampled = sample_plant(loop.plant, loop.computation_delay_s, period);
-    const SampledPlant undelayed = sample_plant(loop.plant, 0.0, period);
-    const SteadyValues steady = steady_values(loop.compensator, undelayed.delta_form);
+    const SteadyValues steady =
+        steady_values(loop.compensator, sample_plant(loop.plant, 0.0, period).delta_form);
+    const TailModes modes(loop, poles_z, steady);
 
     StepSignals signals;
     std::size_t samples = 0;
@@ -217,7 +276,7 @@ std::optional<StepSignals> sampled_step(const SampledLoop& loop, const ComplexVe
         const bool settled = steady.finite && agree(still);
         std::optional<Tail> slow;
         if (!settled && steady.finite)
-            slow = tail_of(loop, poles_z, sampled, undelayed, steady, 3 * samples / 4);
+            slow = modes.after(3 * samples / 4, signals);
         const bool told = settled || (slow && agree(*slow));
         const bool worn_out = samples * plant.pieces().size() > most_pieces;
         if (!told && !worn_out && (until_s == 0.0 || end < until_s))
