@@ -4,10 +4,13 @@
 
 namespace cornerwright {
 
-ComplexVector take_common_roots(RootForm& form) {
+ComplexVector take_common_roots(RootForm& form, double distance) {
     ComplexVector common;
     for (std::size_t i = form.zeros.size(); i-- > 0;) {
-        const auto pole = std::find(form.poles.begin(), form.poles.end(), form.zeros[i]);
+        const auto pole =
+            std::find_if(form.poles.begin(), form.poles.end(), [&](Complex candidate) {
+                return std::abs(candidate - form.zeros[i]) <= distance;
+            });
         if (pole == form.poles.end())
             continue;
         common.push_back(*pole);

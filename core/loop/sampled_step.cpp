@@ -11,8 +11,10 @@
 namespace cornerwright {
 namespace {
 
-constexpr double agreement = 1e-5; // of the size, between simulation and tail
+constexpr double agreement = 5e-5; // of the size, between simulation and tail
 constexpr double slow_turn = 0.3;  // rad or time constants in a sample: the tail is smooth then
+// In z - 1: what the rounding of coefficients and of z leaves of a cancelled root.
+constexpr double same_place = 1e-13;
 constexpr std::size_t first_check = 48; // samples
 constexpr std::size_t most_pieces = 4000000;
 
@@ -159,12 +161,11 @@ TailModes::TailModes(const SampledLoop& loop, const ComplexVector& poles_z,
     const SampledPlant plant = sample_plant(loop.plant, loop.computation_delay_s, period_s_);
     const SampledPlant undelayed = sample_plant(loop.plant, 0.0, period_s_);
     RootForm open = loop.compensator * plant.delta_form;
-    const ComplexVector common = take_common_roots(open);
+    const ComplexVector common = take_common_roots(open, same_place);
     for (const Complex& z : poles_z) {
         const Complex d = z - 1.0;
         const bool cancelled = std::any_of(common.begin(), common.end(), [&](Complex root) {
-            constexpr double rounding = 1e-15; // of z, which d was rounded to
-            return std::abs(root - d) <= rounding;
+            return std::abs(root - d) <= same_place;
         });
         if (z.imag() < 0.0 || z == 0.0 || cancelled)
             continue;
