@@ -45,7 +45,8 @@ ClosedLoopPoles rightmost_poles(const LoopModel& model) {
         FactoredSum({model.roots.poles}, {model.roots.zeros}, model.roots.gain), model.delay_s};
     // Modes left of -3/delay lose 95 % within a single dead time.
     constexpr double decay = 3.0;
-    constexpr double most_links = 40.0; // of the chain of a loop that does not roll off
+    // Of the chain of a loop that does not roll off; its links stand near whole and half numbers.
+    constexpr double most_links = 40.25;
     const SymmetricRectangle rectangle =
         rightmost_rectangle(function, decay, 2.0 * std::numbers::pi * most_links / model.delay_s);
     RootsInside inside = roots_inside(function, rectangle);

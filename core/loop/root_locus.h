@@ -21,7 +21,9 @@ struct AxisCrossing {
 /// Closed-loop poles of the design loop (no hold) as its gain is multiplied by each factor, 0 up to
 /// `factors.back()`.
 struct RootLocus {
-    std::vector<double> factors;       ///< ascending; contains 1 exactly
+    /// Ascending; contains 1 exactly. Begins with 0 where every branch comes from a pole of L, and
+    /// above it where branches come from infinity (dead time, more zeros than poles).
+    std::vector<double> factors;
     std::vector<LocusBranch> branches; ///< same size of `poles` each, continuous, identity kept
     std::vector<AxisCrossing> crossings;
     ComplexVector zeros;             ///< of L
@@ -37,7 +39,9 @@ struct LocusWindow {
 };
 
 /// The locus by continuation with step control. `window` bounds the search where dead time makes
-/// branches without end; nothing: a window around the roots of L.
+/// branches without end; nothing: a window around the roots of L. `warm_start` is not looked at: the
+/// branches are followed anew each time, so that the locus is the same to the bit whatever came
+/// before.
 RootLocus root_locus(const DesignLoop& loop, const LocusWindow* window = nullptr,
                      const RootLocus* warm_start = nullptr);
 
