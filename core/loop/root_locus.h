@@ -39,8 +39,8 @@ struct LocusWindow {
 };
 
 /// The locus by continuation with step control. `window` bounds the search where dead time makes
-/// branches without end; nothing: a window around the roots of L. `warm_start` is not looked at: the
-/// branches are followed anew each time, so that the locus is the same to the bit whatever came
+/// branches without end; nothing: a window around the roots of L. `warm_start` is not looked at:
+/// the branches are followed anew each time, so that the locus is the same to the bit whatever came
 /// before.
 RootLocus root_locus(const DesignLoop& loop, const LocusWindow* window = nullptr,
                      const RootLocus* warm_start = nullptr);
