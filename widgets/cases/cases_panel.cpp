@@ -108,10 +108,10 @@ void CasesPanel::refresh() {
         QStringList facts;
         const QString binding =
             assessment == nullptr ? QString() : bindingFact(assessment->verdict, plantCase.name);
-        facts << caseFact(plantCase);
         if (!binding.isEmpty()) {
             facts << binding;
         }
+        facts << caseFact(plantCase);
         rows_[i]->setCase(QString::fromStdString(plantCase.name), facts.join(QStringLiteral(" · ")),
                           !binding.isEmpty());
     }

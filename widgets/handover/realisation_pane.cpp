@@ -51,7 +51,7 @@ RealisationPane::RealisationPane(ViewState& viewState, QWidget* parent)
       structure_(new QComboBox(this)),
       format_(new QComboBox(this)),
       wordBits_(new QComboBox(this)),
-      fractionBits_(new QuantityField(QuantityKind::plain, this)),
+      fractionBits_(new QuantityField(QuantityKind::count, this)),
       outcome_(new TextLabel(QString(), TextLabel::Kind::muted, this)),
       problem_(new TextLabel(QString(), TextLabel::Kind::problem, this)) {
     build();

@@ -96,7 +96,7 @@ void LedgerPanel::buildView() {
 void LedgerPanel::fitColumns() {
     // In average characters, so that the columns follow the font and the scale.
     constexpr std::pair<int, int> widths[] = {
-        {LedgerModel::mark, 4},   {LedgerModel::measure, 22},  {LedgerModel::limit, 13},
+        {LedgerModel::mark, 4},   {LedgerModel::measure, 27},  {LedgerModel::limit, 13},
         {LedgerModel::worst, 11}, {LedgerModel::headroom, 24}, {LedgerModel::distance, 13},
         {LedgerModel::state, 14},
     };

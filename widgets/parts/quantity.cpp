@@ -45,6 +45,8 @@ constexpr std::array<Unit, 1> decibelUnits{{{u"dB", 1.0}}};
 constexpr std::array<Unit, 1> percentUnits{{{u"%", 1.0}}};
 constexpr std::array<Unit, 2> plainUnits{{{u"", 1.0}, {u"%", 0.01}}};
 
+constexpr std::array<Unit, 1> countUnits{{{u"", 1.0}}};
+
 constexpr std::array<Prefix, 9> prefixes{{{u"", 1.0},
                                           {u"n", 1e-9},
                                           {u"\u00b5", 1e-6},
@@ -75,6 +77,8 @@ std::span<const Unit> unitsOf(QuantityKind kind) {
         return decibelUnits;
     case QuantityKind::percent:
         return percentUnits;
+    case QuantityKind::count:
+        return countUnits;
     case QuantityKind::plain:
         break;
     }
@@ -158,6 +162,8 @@ QString fewDigits(double value, QuantityKind kind, bool hertz) {
         return decibelText(value);
     case QuantityKind::percent:
         return valueText(value, MeasureUnit::percent, hertz);
+    case QuantityKind::count:
+        return fixedText(value, 0);
     case QuantityKind::gain:
     case QuantityKind::plain:
         break;

@@ -16,6 +16,7 @@ enum class QuantityKind {
     angle,     ///< deg
     decibel,   ///< dB
     percent,   ///< %
+    count,     ///< a whole number
     plain,     ///< no unit
 };
 

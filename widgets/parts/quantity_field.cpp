@@ -1,7 +1,10 @@
 #include "widgets/parts/quantity_field.h"
 
+#include "widgets/theme.h"
+
 #include <QFocusEvent>
 #include <QKeyEvent>
+#include <QPainter>
 
 namespace cornerwright {
 
@@ -99,7 +102,6 @@ void QuantityField::setProblem(const QString& problem) {
     if (problem_ != problem) {
         problem_ = problem;
         setToolTip(problem);
-        setProperty("refused", !problem.isEmpty());
         update();
         Q_EMIT problemChanged(problem);
     }
@@ -136,6 +138,23 @@ void QuantityField::focusOutEvent(QFocusEvent* event) {
         typing_ = false;
     }
     showAtRest();
+}
+
+void QuantityField::paintEvent(QPaintEvent* event) {
+    QLineEdit::paintEvent(event);
+    if (hasFrame()) {
+        return;
+    }
+    // Without a frame the field reads as text; a line below it tells where typing goes.
+    const bool refused = !problem_.isEmpty();
+    if (refused || hasFocus() || underMouse()) {
+        const Theme& theme = Theme::of(palette());
+        const ColourRole role = refused      ? ColourRole::unmet
+                                : hasFocus() ? ColourRole::accent
+                                             : ColourRole::hairline;
+        QPainter painter(this);
+        painter.fillRect(QRect(0, height() - 2, width(), 2), theme.colour(role));
+    }
 }
 
 void QuantityField::keyPressEvent(QKeyEvent* event) {

@@ -44,8 +44,11 @@ TrialsPane::TrialsPane(ViewState& viewState, TrialBook& book, QWidget* parent)
     layout_->setContentsMargins(10, 2, 10, 6);
     layout_->setSpacing(4);
     hint_->setWordWrap(true);
+    hint_->setAlignment(Qt::AlignTop);
+    hint_->setSizePolicy(QSizePolicy::Preferred, QSizePolicy::Maximum);
     layout_->addWidget(hint_);
     layout_->addWidget(table_, 1);
+    layout_->addStretch(0);
     table_->setAccessibleName(tr("Differences between the trial and the present design"));
     table_->setHorizontalHeaderLabels(
         {tr("measure"), tr("limit"), tr("trial"), tr("now"), tr("change")});

@@ -66,7 +66,7 @@ void WorkArea::showEvent(QShowEvent* event) {
         return;
     }
     layout()->activate();
-    setShares(columns_, 17, 83);
+    setShares(columns_, 18, 82);
     setShares(right_, 70, 30);
     setShares(panesRow_, 61, 39);
     setShares(left_, 64, 36);
