@@ -4,9 +4,11 @@
 #include "widgets/cases/cases_panel.h"
 #include "widgets/chain/chain_panel.h"
 #include "widgets/chain/section_card.h"
+#include "widgets/handover/handover_flow.h"
 #include "widgets/ledger/ledger_model.h"
 #include "widgets/ledger/ledger_panel.h"
 #include "widgets/parts/quantity_field.h"
+#include "widgets/placement/placement_run.h"
 #include "widgets/trials/trial_book.h"
 #include "widgets/window/file_flow.h"
 #include "widgets/window/main_window.h"
@@ -18,6 +20,7 @@
 #include <QAbstractButton>
 #include <QCheckBox>
 #include <QComboBox>
+#include <QFileInfo>
 #include <QLineEdit>
 #include <QSignalSpy>
 #include <QTableView>
@@ -25,6 +28,8 @@
 #include <QTest>
 #include <gtest/gtest.h>
 
+#include <algorithm>
+#include <cmath>
 #include <numbers>
 
 namespace cornerwright {
@@ -233,6 +238,50 @@ TEST_F(WindowTest, ATrialIsComparedAndReturnedTo) {
     EXPECT_EQ(window.live().content().trial, kept);
     window.trials().compare(std::nullopt);
     EXPECT_EQ(window.live().content().trial, nullptr);
+}
+
+TEST_F(WindowTest, PlacementRaisesTheSmallestHeadroomAsOneUndoStep) {
+    const auto smallest = [this] {
+        double share = HUGE_VAL;
+        for (const RequirementResult& result :
+             window.live().content().assessment->verdict.requirements) {
+            share = std::min(share, result.worst.share.value());
+        }
+        return share;
+    };
+    const double before = smallest();
+    QSignalSpy finished(&window.placement(), &PlacementRun::finished);
+    window.actions().place->trigger();
+    ASSERT_TRUE(finished.wait(longestWait));
+    settle();
+    EXPECT_GT(smallest(), before);
+    EXPECT_FALSE(window.notices().texts().isEmpty());
+    window.actions().undo->trigger();
+    EXPECT_EQ(window.document().project(), smallProject());
+}
+
+TEST_F(WindowTest, AnEditDuringPlacementIsNotOverwritten) {
+    QSignalSpy finished(&window.placement(), &PlacementRun::finished);
+    window.actions().place->trigger();
+    Project edited = smallProject();
+    edited.compensator[0].gain = 1.7;
+    window.document().apply(edited, QStringLiteral("edit"));
+    window.placement().cancel();
+    ASSERT_TRUE(finished.wait(longestWait));
+    EXPECT_EQ(window.document().project(), edited);
+    ASSERT_NE(choice(QStringLiteral("Keep the present design")), nullptr);
+}
+
+TEST_F(WindowTest, HandoverFilesAreWrittenAndAFailureIsTold) {
+    window.handover().exportTo(HandoverForm::c99, QStringLiteral("lift"), folder.path());
+    for (const char* name : {"lift.h", "lift.c", "lift_selfcheck.c"}) {
+        EXPECT_TRUE(QFile::exists(folder.filePath(QString::fromLatin1(name)))) << name;
+    }
+    window.handover().reportTo(folder.filePath(QStringLiteral("review.html")));
+    EXPECT_GT(QFileInfo(folder.filePath(QStringLiteral("review.html"))).size(), 1000);
+    QSignalSpy failed(&window.handover(), &HandoverFlow::failed);
+    window.handover().reportTo(folder.filePath(QStringLiteral("no/such/folder/review.html")));
+    EXPECT_EQ(failed.count(), 1);
 }
 
 TEST_F(WindowTest, CasesAreAddedByFormulaHiddenAndRemoved) {

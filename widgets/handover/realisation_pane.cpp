@@ -1,5 +1,6 @@
 #include "widgets/handover/realisation_pane.h"
 
+#include "widgets/handover/export_row.h"
 #include "widgets/parts/quantity_field.h"
 #include "widgets/parts/text_label.h"
 #include "widgets/view_state.h"
@@ -7,6 +8,7 @@
 #include <QCheckBox>
 #include <QComboBox>
 #include <QGridLayout>
+#include <QScrollArea>
 #include <QVBoxLayout>
 
 #include <algorithm>
@@ -53,7 +55,8 @@ RealisationPane::RealisationPane(ViewState& viewState, QWidget* parent)
       wordBits_(new QComboBox(this)),
       fractionBits_(new QuantityField(QuantityKind::count, this)),
       outcome_(new TextLabel(QString(), TextLabel::Kind::muted, this)),
-      problem_(new TextLabel(QString(), TextLabel::Kind::problem, this)) {
+      problem_(new TextLabel(QString(), TextLabel::Kind::problem, this)),
+      exports_(new ExportRow(this)) {
     build();
     connectFields();
     connect(&viewState, &ViewState::unitChanged, this,
@@ -112,11 +115,26 @@ void RealisationPane::build() {
     addRow(*grid, tr("Word length"), wordBits_);
     addRow(*grid, tr("Fraction bits"), fractionBits_);
     grid->setColumnStretch(1, 1);
-    auto* whole = new QVBoxLayout(this);
+    // The panel is longer than a small pane; it scrolls there.
+    auto* scroll = new QScrollArea(this);
+    auto* content = new QWidget;
+    scroll->setWidget(content);
+    scroll->setWidgetResizable(true);
+    scroll->setFrameShape(QFrame::NoFrame);
+    scroll->setFocusPolicy(Qt::NoFocus);
+    scroll->setHorizontalScrollBarPolicy(Qt::ScrollBarAlwaysOff);
+    scroll->setAccessibleName(tr("Sampling, realisation and handover"));
+    scroll->viewport()->setAutoFillBackground(false);
+    content->setAutoFillBackground(false);
+    auto* frame = new QVBoxLayout(this);
+    frame->setContentsMargins(0, 0, 0, 0);
+    frame->addWidget(scroll);
+    auto* whole = new QVBoxLayout(content);
     whole->setContentsMargins(10, 4, 10, 6);
     whole->addLayout(grid);
     whole->addWidget(outcome_);
     whole->addWidget(problem_);
+    whole->addWidget(exports_);
     whole->addStretch(1);
     outcome_->setWordWrap(true);
     problem_->setWordWrap(true);
@@ -216,6 +234,7 @@ void RealisationPane::setContent(const PaneContent& content) {
 }
 
 void RealisationPane::refresh() {
+    exports_->setAssessment(content_.assessment.get());
     setEnabled(content_.project != nullptr);
     if (!content_.project) {
         return;

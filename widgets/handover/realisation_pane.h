@@ -10,6 +10,7 @@ class QGridLayout;
 
 namespace cornerwright {
 
+class ExportRow;
 class QuantityField;
 class TextLabel;
 
@@ -23,6 +24,8 @@ class RealisationPane : public Pane {
 
     void setContent(const PaneContent& content) override;
     QString title() const override { return tr("Handover"); }
+
+    ExportRow& exports() const { return *exports_; }
 
   private:
     void build();
@@ -45,6 +48,7 @@ class RealisationPane : public Pane {
     QuantityField* fractionBits_;
     TextLabel* outcome_;
     TextLabel* problem_;
+    ExportRow* exports_;
 };
 
 } // namespace cornerwright

@@ -4,7 +4,11 @@
 #include "widgets/chain/chain_edits.h"
 #include "widgets/chain/chain_panel.h"
 #include "widgets/figure_text.h"
+#include "widgets/handover/export_row.h"
+#include "widgets/handover/handover_flow.h"
+#include "widgets/handover/realisation_pane.h"
 #include "widgets/ledger/ledger_panel.h"
+#include "widgets/placement/placement_run.h"
 #include "widgets/trials/trial_menu.h"
 #include "widgets/window/about_page.h"
 #include "widgets/window/file_flow.h"
@@ -53,12 +57,16 @@ MainWindow::MainWindow(const Places& places, QWidget* parent)
     setAcceptDrops(true);
     build();
     files_ = new FileFlow(document_, *notices_, settings_, places.recoveryFolder, this);
+    handover_ = new HandoverFlow(this);
+    placement_ = new PlacementRun(this);
     fillMenus(*this);
     connectActions();
     connectSectionActions();
     connectDocument();
     connectPanes();
     connectTrials();
+    connectHandover();
+    connectPlacement();
     showHistory();
     showCases();
     resize(firstSize);
@@ -156,13 +164,16 @@ void MainWindow::connectDocument() {
     connect(&live_, &LiveContent::contentChanged, this, &MainWindow::showContent);
     AssessmentRunner& runner = live_.runner();
     connect(&runner, &AssessmentRunner::busyChanged, this, [this](bool busy) {
-        busy ? status_->begin(tr("Assessing every case …")) : status_->end();
+        if (!placement_->isRunning()) {
+            busy ? status_->begin(tr("Assessing every case …")) : status_->end();
+        }
     });
     connect(&runner, &AssessmentRunner::failed, this, [this](const QString& why) {
         notices_->show(NoticeStrip::Kind::problem, tr("The assessment failed: %1").arg(why),
                        QStringLiteral("assessment"));
     });
-    connect(status_, &RunStatus::cancelAsked, &runner, &AssessmentRunner::cancel);
+    connect(status_, &RunStatus::cancelAsked, this,
+            [this, &runner] { placement_->isRunning() ? placement_->cancel() : runner.cancel(); });
     chain_->setPlaceForNew([this] {
         constexpr double fallback = 10.0;
         const PaneContent& content = live_.content();
@@ -198,8 +209,6 @@ void MainWindow::connectTrials() {
     });
     connect(actions_->showTrials, &QAction::triggered, this,
             [this] { area_->reveal(QStringLiteral("trials"), WorkArea::lower_right); });
-    connect(actions_->showHandover, &QAction::triggered, this,
-            [this] { area_->reveal(QStringLiteral("handover"), WorkArea::lower_right); });
     connect(&document_, &Document::projectReplaced, &trials_, &TrialBook::clear);
     connect(&trials_, &TrialBook::changed, this, [this] {
         const Trial* trial = trials_.comparedTrial();
@@ -208,11 +217,60 @@ void MainWindow::connectTrials() {
     });
 }
 
+void MainWindow::connectHandover() {
+    const auto* pane = qobject_cast<RealisationPane*>(area_->pane(QStringLiteral("handover")));
+    connect(&pane->exports(), &ExportRow::exportAsked, handover_, &HandoverFlow::chooseAndExport);
+    connect(&pane->exports(), &ExportRow::reportAsked, handover_, &HandoverFlow::chooseAndReport);
+    connect(actions_->writeReport, &QAction::triggered, handover_, &HandoverFlow::chooseAndReport);
+    connect(actions_->showHandover, &QAction::triggered, this,
+            [this] { area_->reveal(QStringLiteral("handover"), WorkArea::lower_right); });
+    connect(handover_, &HandoverFlow::done, this, [this](const QString& sentence) {
+        notices_->show(NoticeStrip::Kind::information, sentence, QStringLiteral("handover"));
+    });
+    connect(handover_, &HandoverFlow::failed, this, [this](const QString& sentence) {
+        notices_->show(NoticeStrip::Kind::problem, sentence, QStringLiteral("handover"));
+    });
+}
+
+void MainWindow::connectPlacement() {
+    connect(actions_->place, &QAction::triggered, this, [this] {
+        document_.cancelDrag();
+        placement_->start(document_.shared());
+        status_->begin(tr("Placing the unlocked corners …"));
+    });
+    connect(placement_, &PlacementRun::progressed, this, [this](double share) {
+        status_->begin(tr("Placing the unlocked corners … %1 %").arg(qRound(100.0 * share)));
+    });
+    connect(placement_, &PlacementRun::finished, this, &MainWindow::takePlacement);
+    connect(placement_, &PlacementRun::failed, this, [this](const QString& why) {
+        status_->end();
+        notices_->show(NoticeStrip::Kind::problem, why, QStringLiteral("placement"));
+    });
+}
+
+void MainWindow::takePlacement(const ProjectPointer& start, const ProjectPointer& placed,
+                               const QStringList& words) {
+    status_->end();
+    const QString told = words.join(QLatin1Char(' '));
+    const auto take = [this, placed] { document_.apply(*placed, tr("Place corners")); };
+    if (document_.project() == *start) {
+        take();
+        notices_->show(NoticeStrip::Kind::information, told, QStringLiteral("placement"));
+        return;
+    }
+    // What was edited meanwhile is not overwritten unasked.
+    notices_->show(NoticeStrip::Kind::question,
+                   tr("The design was changed while corners were placed. %1").arg(told),
+                   QStringLiteral("placement"),
+                   {{tr("Take the placed corners"), take}, {tr("Keep the present design"), [] {}}});
+}
+
 void MainWindow::showContent() {
     const PaneContent& content = live_.content();
     area_->setContent(content);
     ledger_->setContent(content);
     cases_->setContent(content);
+    handover_->setContent(content);
     bar_->pill()->setVerdict(content.assessment ? &content.assessment->verdict : nullptr,
                              viewState_.showsHertz());
 }
@@ -223,6 +281,7 @@ void MainWindow::showHistory() {
     setWindowTitle(tr("%1[*] - Cornerwright").arg(document_.displayName()));
     setWindowModified(document_.isModified());
     setWindowFilePath(document_.filePath());
+    handover_->setProjectFile(document_.isModified() ? QString() : document_.filePath());
     status_->setFacts(document_.isModified() ? tr("unsaved changes") : QString());
 }
 

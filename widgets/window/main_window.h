@@ -17,8 +17,10 @@ namespace cornerwright {
 class CasesPanel;
 class ChainPanel;
 class FileFlow;
+class HandoverFlow;
 class LedgerPanel;
 class NoticeStrip;
+class PlacementRun;
 class RunStatus;
 class TopBar;
 class WindowActions;
@@ -44,6 +46,8 @@ class MainWindow : public QMainWindow {
     LiveContent& live() { return live_; }
     TrialBook& trials() { return trials_; }
     FileFlow& files() { return *files_; }
+    HandoverFlow& handover() { return *handover_; }
+    PlacementRun& placement() { return *placement_; }
     WorkArea& area() { return *area_; }
     ChainPanel& chain() { return *chain_; }
     CasesPanel& cases() { return *cases_; }
@@ -64,6 +68,10 @@ class MainWindow : public QMainWindow {
     void connectDocument();
     void connectPanes();
     void connectTrials();
+    void connectHandover();
+    void connectPlacement();
+    void takePlacement(const ProjectPointer& start, const ProjectPointer& placed,
+                       const QStringList& words);
     void showContent();
     void showHistory();
     void showCases();
@@ -87,6 +95,8 @@ class MainWindow : public QMainWindow {
     WorkArea* area_;
     RunStatus* status_;
     FileFlow* files_;
+    HandoverFlow* handover_;
+    PlacementRun* placement_;
     bool mayClose_ = false;
 };
 

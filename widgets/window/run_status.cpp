@@ -38,6 +38,9 @@ RunStatus::RunStatus(QWidget* parent)
 
 void RunStatus::begin(const QString& what) {
     running_ = what;
+    if (told_) {
+        refresh();
+    }
     if (!patience_.isActive() && !told_) {
         patience_.start();
     }

@@ -54,7 +54,9 @@ TopBar::TopBar(const WindowActions& actions, QWidget* parent)
     row->addWidget(trial_);
     addButton(row, actions.keepTrial);
     addLine(row);
+    addButton(row, actions.place);
     addButton(row, actions.showHandover);
+    addButton(row, actions.writeReport);
     row->addStretch(1);
     row->addWidget(pill_, 0);
     setHertz(true);

@@ -48,8 +48,15 @@ WindowActions::WindowActions(QWidget* window) : QObject(window), window_(window)
     keepTrial->setIconText(tr("Keep"));
     showTrials = make(tr("Compare &trials"), QKeySequence(Qt::CTRL | Qt::Key_T),
                       tr("Show kept trials and how their figures differ"));
+    place = make(tr("&Place corners"), QKeySequence(Qt::CTRL | Qt::Key_E),
+                 tr("Move the unlocked corners so that the smallest headroom grows"));
+    place->setIconText(tr("Place"));
     showHandover = make(tr("&Handover"), QKeySequence(Qt::CTRL | Qt::Key_D),
                         tr("Sampling and realisation: what the firmware gets"));
+
+    writeReport = make(tr("Write &report"), QKeySequence(Qt::CTRL | Qt::Key_P),
+                       tr("Write the design review report as one HTML file"));
+    writeReport->setIconText(tr("Report"));
 
     about = make(tr("&About Cornerwright"), QKeySequence(),
                  tr("What this program is, and its cautions"));

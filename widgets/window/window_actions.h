@@ -34,7 +34,9 @@ class WindowActions : public QObject {
 
     QAction* keepTrial;
     QAction* showTrials;
+    QAction* place;
     QAction* showHandover;
+    QAction* writeReport;
 
     QAction* about;
 

@@ -75,9 +75,11 @@ void fillMenus(MainWindow& window) {
     view->addActions({actions.wholePane, actions.allPanes});
 
     QMenu* design = bar->addMenu(MainWindow::tr("&Design"));
+    design->addAction(actions.place);
+    design->addSeparator();
     design->addActions({actions.keepTrial, actions.showTrials});
     design->addSeparator();
-    design->addAction(actions.showHandover);
+    design->addActions({actions.showHandover, actions.writeReport});
 
     QMenu* help = bar->addMenu(MainWindow::tr("&Help"));
     help->addAction(actions.about);

@@ -1,0 +1,79 @@
+#include "widgets/handover/export_row.h"
+
+#include "core/handover/report.h"
+#include "widgets/parts/link_button.h"
+#include "widgets/parts/text_label.h"
+
+#include <QHBoxLayout>
+#include <QLineEdit>
+#include <QVBoxLayout>
+
+#include <algorithm>
+
+namespace cornerwright {
+
+ExportRow::ExportRow(QWidget* parent)
+    : QWidget(parent),
+      name_(new QLineEdit(QStringLiteral("compensator"), this)),
+      warning_(new TextLabel(QString(), TextLabel::Kind::problem, this)) {
+    auto* whole = new QVBoxLayout(this);
+    whole->setContentsMargins(0, 6, 0, 0);
+    auto* names = new QHBoxLayout;
+    names->addWidget(new TextLabel(tr("Name in the files"), TextLabel::Kind::muted, this));
+    names->addWidget(name_, 1);
+    name_->setAccessibleName(tr("Name in the files"));
+    auto* buttons = new QHBoxLayout;
+    buttons->setSpacing(0);
+    const std::pair<QString, HandoverForm> forms[] = {
+        {tr("C99"), HandoverForm::c99},
+        {tr("Structured text"), HandoverForm::structured_text},
+        {tr("JSON"), HandoverForm::json},
+        {tr("CSV"), HandoverForm::csv},
+    };
+    for (const auto& [text, form] : forms) {
+        auto* button = new LinkButton(text, this);
+        button->setAccessibleName(tr("Hand over as %1").arg(text));
+        connect(button, &LinkButton::clicked, this,
+                [this, form = form] { Q_EMIT exportAsked(form, name()); });
+        buttons->addWidget(button);
+        exports_.push_back(button);
+    }
+    auto* report = new LinkButton(tr("Report"), this);
+    report->setAccessibleName(tr("Write the review report"));
+    connect(report, &LinkButton::clicked, this, &ExportRow::reportAsked);
+    buttons->addWidget(report);
+    buttons->addStretch(1);
+    auto* caution = new TextLabel(QString(), TextLabel::Kind::muted, this);
+    QStringList sentences;
+    for (const std::string& sentence : cautions()) {
+        sentences << QString::fromStdString(sentence);
+    }
+    caution->setText(sentences.join(QLatin1Char(' ')));
+    caution->setWordWrap(true);
+    warning_->setWordWrap(true);
+    whole->addLayout(names);
+    whole->addLayout(buttons);
+    whole->addWidget(warning_);
+    whole->addWidget(caution);
+    setAssessment(nullptr);
+}
+
+QString ExportRow::name() const {
+    return name_->text().trimmed();
+}
+
+void ExportRow::setAssessment(const Assessment* assessment) {
+    for (QWidget* button : exports_) {
+        button->setEnabled(assessment != nullptr && assessment->equation.has_value());
+    }
+    const auto unmet = assessment == nullptr
+                           ? 0
+                           : std::ranges::count_if(assessment->verdict.requirements,
+                                                   [](const RequirementResult& result) {
+                                                       return result.worst.state == State::unmet;
+                                                   });
+    warning_->setText(tr("✗ %1 of the requirements are unmet; every file will say so.").arg(unmet));
+    warning_->setVisible(unmet > 0);
+}
+
+} // namespace cornerwright
