@@ -4,6 +4,7 @@
 #include "widgets/parts/link_button.h"
 #include "widgets/parts/text_label.h"
 
+#include <QGridLayout>
 #include <QHBoxLayout>
 #include <QLineEdit>
 #include <QVBoxLayout>
@@ -22,8 +23,9 @@ ExportRow::ExportRow(QWidget* parent)
     names->addWidget(new TextLabel(tr("Name in the files"), TextLabel::Kind::muted, this));
     names->addWidget(name_, 1);
     name_->setAccessibleName(tr("Name in the files"));
-    auto* buttons = new QHBoxLayout;
+    auto* buttons = new QGridLayout;
     buttons->setSpacing(0);
+    constexpr int perRow = 3;
     const std::pair<QString, HandoverForm> forms[] = {
         {tr("C99"), HandoverForm::c99},
         {tr("Structured text"), HandoverForm::structured_text},
@@ -35,14 +37,16 @@ ExportRow::ExportRow(QWidget* parent)
         button->setAccessibleName(tr("Hand over as %1").arg(text));
         connect(button, &LinkButton::clicked, this,
                 [this, form = form] { Q_EMIT exportAsked(form, name()); });
-        buttons->addWidget(button);
+        const auto place = static_cast<int>(exports_.size());
+        buttons->addWidget(button, place / perRow, place % perRow, Qt::AlignLeft);
         exports_.push_back(button);
     }
     auto* report = new LinkButton(tr("Report"), this);
     report->setAccessibleName(tr("Write the review report"));
     connect(report, &LinkButton::clicked, this, &ExportRow::reportAsked);
-    buttons->addWidget(report);
-    buttons->addStretch(1);
+    const auto last = static_cast<int>(exports_.size());
+    buttons->addWidget(report, last / perRow, last % perRow, Qt::AlignLeft);
+    buttons->setColumnStretch(perRow, 1);
     auto* caution = new TextLabel(QString(), TextLabel::Kind::muted, this);
     QStringList sentences;
     for (const std::string& sentence : cautions()) {

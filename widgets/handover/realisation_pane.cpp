@@ -101,6 +101,12 @@ void RealisationPane::build() {
         wordBits_->addItem(tr("%1 bits").arg(bits), bits);
     }
 
+    for (QComboBox* box : {method_, structure_, format_, wordBits_}) {
+        constexpr int leastCharacters = 8;
+        box->setSizeAdjustPolicy(QComboBox::AdjustToMinimumContentsLengthWithIcon);
+        box->setMinimumContentsLength(leastCharacters);
+    }
+
     auto* grid = new QGridLayout;
     grid->setHorizontalSpacing(12);
     grid->setVerticalSpacing(4);

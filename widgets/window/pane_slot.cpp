@@ -39,6 +39,8 @@ PaneSlot::PaneSlot(bool canSwitch, QWidget* parent)
     if (canSwitch) {
         auto* menu = new QMenu(name_);
         name_->setMenu(menu);
+        // The mark stands in the text: the style's own sits in the corner and is easily missed.
+        name_->setStyleSheet(QStringLiteral("QToolButton::menu-indicator { image: none; }"));
         name_->setPopupMode(QToolButton::InstantPopup);
         name_->setToolTip(tr("Show another pane here"));
         connect(menu, &QMenu::aboutToShow, this, [this, menu] {
@@ -63,7 +65,8 @@ void PaneSlot::setPane(Pane* pane) {
     if (pane_ == nullptr) {
         return;
     }
-    name_->setText(pane_->title());
+    name_->setText(name_->menu() != nullptr ? pane_->title() + QStringLiteral(" ▾")
+                                            : pane_->title());
     name_->setAccessibleName(tr("Pane: %1").arg(pane_->title()));
     whole_->setAccessibleName(tr("%1: take the whole window").arg(pane_->title()));
     headWidget_ = pane_->headWidget();

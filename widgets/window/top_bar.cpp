@@ -4,6 +4,7 @@
 #include "widgets/window/verdict_pill.h"
 #include "widgets/window/window_actions.h"
 
+#include <QEvent>
 #include <QFrame>
 #include <QHBoxLayout>
 #include <QMenu>
@@ -59,9 +60,32 @@ TopBar::TopBar(const WindowActions& actions, QWidget* parent)
     addButton(row, actions.writeReport);
     row->addStretch(1);
     row->addWidget(pill_, 0);
+    dress();
     setHertz(true);
     setTrialName({});
     setCases({}, 0);
+}
+
+void TopBar::changeEvent(QEvent* event) {
+    QWidget::changeEvent(event);
+    if (event->type() == QEvent::PaletteChange) {
+        dress();
+    }
+}
+
+void TopBar::dress() {
+    // The unit counts for every number on the screen, so it stands out; names of menus end in a
+    // mark of their own instead of the small one in the corner.
+    const Theme& theme = Theme::of(palette());
+    constexpr double tint = 0.1;
+    hertz_->setStyleSheet(QStringLiteral("QToolButton { color: %1; background: %2; border: 1px "
+                                         "solid %1; border-radius: 4px; padding: 3px 8px; }"
+                                         "QToolButton:focus { border-width: 2px; }")
+                              .arg(theme.colour(ColourRole::accent).name(),
+                                   theme.faint(ColourRole::accent, tint).name()));
+    for (QToolButton* button : {case_, trial_}) {
+        button->setStyleSheet(QStringLiteral("QToolButton::menu-indicator { image: none; }"));
+    }
 }
 
 QToolButton* TopBar::addButton(QHBoxLayout* row, QAction* action) {
@@ -102,14 +126,15 @@ void TopBar::setCases(const QStringList& names, int shown) {
         action->setChecked(i == shown);
     }
     const QString name = shown >= 0 && shown < names.size() ? names[shown] : tr("no case");
-    case_->setText(tr("Case: %1").arg(shortened(name)));
+    case_->setText(tr("Case: %1 ▾").arg(shortened(name)));
     case_->setAccessibleName(tr("Case shown: %1").arg(name));
     case_->setEnabled(!names.isEmpty());
 }
 
 void TopBar::setTrialName(const QString& name) {
-    trial_->setText(name.isEmpty() ? tr("Trial: none") : tr("Trial: %1").arg(shortened(name)));
-    trial_->setAccessibleName(trial_->text());
+    trial_->setText(name.isEmpty() ? tr("Trial: none ▾") : tr("Trial: %1 ▾").arg(shortened(name)));
+    trial_->setAccessibleName(name.isEmpty() ? tr("Compared trial: none")
+                                             : tr("Compared trial: %1").arg(name));
 }
 
 void TopBar::paintEvent(QPaintEvent*) {

@@ -32,10 +32,12 @@ class TopBar : public QWidget {
 
   protected:
     void paintEvent(QPaintEvent* event) override;
+    void changeEvent(QEvent* event) override;
 
   private:
     QToolButton* addButton(QHBoxLayout* row, QAction* action);
     void addLine(QHBoxLayout* row);
+    void dress();
 
     QToolButton* hertz_;
     QToolButton* case_;
