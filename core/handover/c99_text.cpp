@@ -147,6 +147,19 @@ std::string contraction_text(const NumberFormat& format) {
            " * fast-math. */\n#if defined(__clang__)\n#pragma STDC FP_CONTRACT OFF\n#endif\n\n";
 }
 
+enum class Constants { all, of_reset };
+
+/// Constants stand inside the functions, so that nothing but the interface has a name outside.
+std::string constant_text(const std::vector<TextConstant>& constants, const Types& types,
+                          Constants which) {
+    std::string text;
+    for (const TextConstant& constant : constants)
+        if (which == Constants::all || constant.of_limits)
+            text += "    static const " + types.sum + " " + constant.name + " = " + constant.value +
+                    ";\n";
+    return text;
+}
+
 std::string source_text(const HandoverInput& input, const StepText& step, const Types& types) {
     const std::string& name = input.name;
     const NumberFormat& format = input.assessment->equation->realisation.number_format;
@@ -154,9 +167,7 @@ std::string source_text(const HandoverInput& input, const StepText& step, const 
     std::string text = "/* " + plain_comment(verdict_sentence(*input.assessment)) +
                        "\n * The evidence stands in " + name + ".h. */\n#include \"" + name +
                        ".h\"\n\n" + contraction_text(format);
-    for (const TextConstant& constant : step.constants)
-        text += "static const " + types.sum + " " + constant.name + " = " + constant.value + ";\n";
-    text += "\n" + helper_text(name, format, types);
+    text += helper_text(name, format, types);
 
     const std::string zero = fixed ? "0" : C99(format, name).real(0.0);
     text += "void " + name + "_init(" + name + "_state *state)\n{\n";
@@ -167,13 +178,14 @@ std::string source_text(const HandoverInput& input, const StepText& step, const 
     text +=
         "}\n\nvoid " + name + "_reset(" + name + "_state *state, " + types.signal + " output)\n{\n";
     if (!step.reset.empty())
-        text += "    " + types.sum + " y = output;\n\n";
+        text += constant_text(step.constants, types, Constants::of_reset) + "    " + types.sum +
+                " y = output;\n\n";
     text += "    " + name + "_init(state);\n";
     text += step.reset.empty() ? "    (void)output;\n" : indented(step.reset);
 
     text += "}\n\n" + types.signal + " " + name + "_step(" + name + "_state *state, " +
-            types.signal + " error)\n{\n    " + types.sum + " x = error;\n    " + types.sum +
-            " y;\n";
+            types.signal + " error)\n{\n" + constant_text(step.constants, types, Constants::all) +
+            "    " + types.sum + " x = error;\n    " + types.sum + " y;\n";
     for (const std::string& local : step.locals)
         text += "    " + types.sum + " " + local + ";\n";
     text += "\n";

@@ -56,7 +56,7 @@ class StepWriter {
     std::string constant(const std::string& name, const std::string& value) {
         const auto same = [&name](const TextConstant& other) { return other.name == name; };
         if (std::ranges::none_of(result_.constants, same))
-            result_.constants.push_back({name, value});
+            result_.constants.push_back({name, value, false});
         return name;
     }
 
@@ -183,7 +183,9 @@ class StepWriter {
     // ---- output limits
 
     std::string limit(const std::string& name, double value) {
-        return constant(name, fixed_ ? word_literal(value, format_) : dialect_.real(value));
+        result_.constants.push_back(
+            {name, fixed_ ? word_literal(value, format_) : dialect_.real(value), true});
+        return name;
     }
 
     void write_limits() {

@@ -38,6 +38,7 @@ class Dialect {
 struct TextConstant {
     std::string name;
     std::string value;
+    bool of_limits = false; ///< an output limit, which reset needs too
 };
 
 /// One sample of a difference equation as statements, in the order of operations of the bit-true
