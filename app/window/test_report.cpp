@@ -5,8 +5,10 @@
 #include "widgets/ledger/ledger_model.h"
 #include "widgets/ledger/ledger_panel.h"
 #include "widgets/panes/plot_pane.h"
+#include "widgets/parts/link_button.h"
 #include "widgets/parts/quantity_field.h"
 #include "widgets/window/main_window.h"
+#include "widgets/window/notice_strip.h"
 #include "widgets/window/work_area.h"
 
 #include <QJsonArray>
@@ -60,6 +62,25 @@ QJsonArray handlesOf(const PlotPane& pane) {
     return handles;
 }
 
+QJsonArray noticesOf(const NoticeStrip& strip) {
+    QJsonArray notices;
+    for (const QFrame* notice :
+         strip.findChildren<QFrame*>(QString(), Qt::FindDirectChildrenOnly)) {
+        if (!notice->isVisible()) {
+            continue;
+        }
+        QJsonArray choices;
+        for (const LinkButton* button : notice->findChildren<LinkButton*>()) {
+            QJsonObject choice = placeOf(*button);
+            choice[QStringLiteral("text")] = button->text();
+            choices.append(choice);
+        }
+        notices.append(QJsonObject{{QStringLiteral("text"), notice->accessibleDescription()},
+                                   {QStringLiteral("choices"), choices}});
+    }
+    return notices;
+}
+
 } // namespace
 
 TestReport::TestReport(MainWindow& window, const QString& file)
@@ -85,6 +106,7 @@ void TestReport::write() {
     report[QStringLiteral("file")] = window_.document().filePath();
     report[QStringLiteral("window")] = placeOf(window_);
     report[QStringLiteral("ledger")] = ledgerOf(*window_.ledger().model());
+    report[QStringLiteral("notices")] = noticesOf(window_.notices());
     QJsonObject panes;
     for (const auto& [key, pane] : window_.area().panes()) {
         QJsonObject entry = placeOf(*pane);
