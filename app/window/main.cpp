@@ -1,7 +1,7 @@
-#include "app/window/appearance.h"
 #include "app/window/demo_place.h"
 #include "app/window/picture.h"
 #include "app/window/test_report.h"
+#include "widgets/window/appearance.h"
 #include "widgets/window/file_flow.h"
 #include "widgets/window/main_window.h"
 

@@ -9,7 +9,9 @@
 #include "widgets/ledger/ledger_panel.h"
 #include "widgets/parts/quantity_field.h"
 #include "widgets/placement/placement_run.h"
+#include "widgets/theme.h"
 #include "widgets/trials/trial_book.h"
+#include "widgets/window/appearance.h"
 #include "widgets/window/file_flow.h"
 #include "widgets/window/main_window.h"
 #include "widgets/window/notice_strip.h"
@@ -282,6 +284,46 @@ TEST_F(WindowTest, HandoverFilesAreWrittenAndAFailureIsTold) {
     QSignalSpy failed(&window.handover(), &HandoverFlow::failed);
     window.handover().reportTo(folder.filePath(QStringLiteral("no/such/folder/review.html")));
     EXPECT_EQ(failed.count(), 1);
+}
+
+TEST_F(WindowTest, TheGroundChangesUnderARunningWindow) {
+    for (QAction* ground : window.actions().grounds->actions()) {
+        ground->trigger();
+        QCoreApplication::processEvents();
+        const bool dark = ground->data().toInt() == static_cast<int>(Ground::dark);
+        if (ground->data().toInt() != static_cast<int>(Ground::system)) {
+            EXPECT_EQ(Theme::of(window.palette()).isDark(), dark);
+            EXPECT_EQ(Theme::of(window.chain().palette()).isDark(), dark);
+        }
+    }
+    applyAppearance(Ground::light);
+}
+
+TEST_F(WindowTest, DroppedMeasurementsBecomeCasesAndABadOneIsTold) {
+    const auto write = [this](const QString& name, const QByteArray& text) {
+        QFile file(folder.filePath(name));
+        EXPECT_TRUE(file.open(QIODevice::WriteOnly));
+        file.write(text);
+        return file.fileName();
+    };
+    const QByteArray good = "frequency (Hz),magnitude (dB),phase (deg)\n"
+                            "1,20,-95\n2,14,-100\n5,5,-110\n10,-2,-125\n20,-10,-140\n";
+    const QString first = write(QStringLiteral("unit 7.csv"), good);
+    const QString bad = write(QStringLiteral("unit 8.csv"), "frequency (Hz),magnitude (dB)\n1,x\n");
+    window.files().take({first, first, bad});
+    const std::vector<PlantCase>& cases = window.document().project().plant_cases;
+    ASSERT_EQ(cases.size(), 5u);
+    EXPECT_EQ(cases[3].name, "unit 7");
+    EXPECT_EQ(cases[4].name, "unit 7 2");
+    const auto& source = std::get<MeasurementSource>(cases[3].source);
+    EXPECT_EQ(source.response->w_rad_s.size(), 5u);
+    EXPECT_EQ(source.sha256.size(), 64u);
+    ASSERT_FALSE(window.notices().texts().isEmpty());
+    EXPECT_TRUE(window.notices().texts().first().contains(QStringLiteral("unit 8.csv")));
+    settle();
+    // All files that were dropped together are one step.
+    window.actions().undo->trigger();
+    EXPECT_EQ(window.document().project(), smallProject());
 }
 
 TEST_F(WindowTest, CasesAreAddedByFormulaHiddenAndRemoved) {

@@ -11,6 +11,7 @@
 #include "widgets/placement/placement_run.h"
 #include "widgets/trials/trial_menu.h"
 #include "widgets/window/about_page.h"
+#include "widgets/window/appearance.h"
 #include "widgets/window/file_flow.h"
 #include "widgets/window/notice_strip.h"
 #include "widgets/window/pane_set.h"
@@ -114,6 +115,9 @@ void MainWindow::connectActions() {
     connect(actions_->redo, &QAction::triggered, &document_, &Document::redo);
     connect(actions_->addFormula, &QAction::triggered, cases_, &CasesPanel::beginFormula);
     connect(actions_->hertz, &QAction::toggled, &viewState_, &ViewState::setShowsHertz);
+    connect(actions_->grounds, &QActionGroup::triggered, this, [](const QAction* action) {
+        applyAppearance(static_cast<Ground>(action->data().toInt()));
+    });
     connect(actions_->nextCase, &QAction::triggered, this, [this] { stepCase(1); });
     connect(actions_->previousCase, &QAction::triggered, this, [this] { stepCase(-1); });
     connect(actions_->wholePane, &QAction::triggered, this, &MainWindow::setWholePane);

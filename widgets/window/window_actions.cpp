@@ -1,5 +1,7 @@
 #include "widgets/window/window_actions.h"
 
+#include "widgets/window/appearance.h"
+
 #include <QKeySequence>
 #include <QWidget>
 
@@ -38,6 +40,16 @@ WindowActions::WindowActions(QWidget* window) : QObject(window), window_(window)
                     tr("Show the next plant case"));
     previousCase = make(tr("&Previous case"), QKeySequence(Qt::CTRL | Qt::Key_PageUp),
                         tr("Show the plant case before"));
+    grounds = new QActionGroup(this);
+    const std::pair<QString, Ground> names[] = {{tr("Ground as the system has it"), Ground::system},
+                                                {tr("Light ground"), Ground::light},
+                                                {tr("Dark ground"), Ground::dark}};
+    for (const auto& [name, ground] : names) {
+        QAction* action = make(name, QKeySequence(), name);
+        action->setCheckable(true);
+        action->setData(static_cast<int>(ground));
+        grounds->addAction(action);
+    }
     wholePane = make(tr("Pane takes the &whole window"), QKeySequence(Qt::Key_F11),
                      tr("The pane with the focus takes the whole window"));
     allPanes = make(tr("&All panes again"), QKeySequence(Qt::SHIFT | Qt::Key_F11),

@@ -1,6 +1,7 @@
 #pragma once
 
 #include <QAction>
+#include <QActionGroup>
 #include <QObject>
 
 namespace cornerwright {
@@ -29,6 +30,7 @@ class WindowActions : public QObject {
     QAction* hertz; ///< checkable: Hz rather than rad/s
     QAction* nextCase;
     QAction* previousCase;
+    QActionGroup* grounds; ///< system, light, dark; each carries its Ground as data
     QAction* wholePane;
     QAction* allPanes;
 

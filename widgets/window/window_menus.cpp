@@ -71,6 +71,8 @@ void fillMenus(MainWindow& window) {
     QMenu* view = bar->addMenu(MainWindow::tr("&View"));
     view->addActions({actions.hertz, actions.previousCase, actions.nextCase});
     view->addSeparator();
+    view->addActions(actions.grounds->actions());
+    view->addSeparator();
     addPlaces(*view, window.area());
     view->addActions({actions.wholePane, actions.allPanes});
 

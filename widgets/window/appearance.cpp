@@ -1,4 +1,4 @@
-#include "app/window/appearance.h"
+#include "widgets/window/appearance.h"
 
 #include "widgets/theme.h"
 
@@ -8,6 +8,7 @@
 namespace cornerwright {
 
 void applyAppearance(Ground ground) {
+    QApplication::setPalette(QPalette()); // the system's own again
     const Theme& system = Theme::of(QApplication::palette());
     const Theme& theme = ground == Ground::light  ? Theme::light()
                          : ground == Ground::dark ? Theme::dark()
