@@ -103,11 +103,11 @@ int main(int argc, char** argv) {
         QStringLiteral("[file...]"));
     parser.process(application);
 
-    applyAppearance(parser.isSet(options.dark)    ? Ground::dark
-                    : parser.isSet(options.light) ? Ground::light
-                                                  : Ground::system);
     const bool picture = parser.isSet(options.picture);
     MainWindow window(placesFor(picture));
+    applyAppearance(parser.isSet(options.dark)    ? Ground::dark
+                    : parser.isSet(options.light) ? Ground::light
+                                                  : window.rememberedGround());
     openFirst(window, parser.positionalArguments(), parser.isSet(options.demo));
     if (picture) {
         const std::optional<QSize> size = readSize(parser.value(options.size));

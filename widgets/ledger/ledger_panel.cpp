@@ -87,6 +87,7 @@ void LedgerPanel::buildView() {
     header->setSectionResizeMode(LedgerModel::where, QHeaderView::Stretch);
     header->setMinimumSectionSize(24);
     fitColumns();
+    dressHeader();
     connect(view_, &QTableView::clicked, this,
             [this](const QModelIndex& index) { goToWorst(index.row()); });
     connect(view_, &QTableView::doubleClicked, this,
@@ -104,14 +105,24 @@ void LedgerPanel::fitColumns() {
     for (const auto& [column, characters] : widths) {
         view_->setColumnWidth(column, characters * metrics.averageCharWidth());
     }
+    view_->verticalHeader()->setDefaultSectionSize(metrics.height() + 6);
+    view_->verticalHeader()->setSectionResizeMode(QHeaderView::Fixed);
+}
+
+void LedgerPanel::dressHeader() {
     const QString muted = Theme::of(palette()).colour(ColourRole::muted).name();
     view_->horizontalHeader()->setStyleSheet(
         QStringLiteral("QHeaderView { background: transparent; border: none; }"
                        "QHeaderView::section { background: transparent; border: none;"
                        " padding: 1px 6px; color: %1; }")
             .arg(muted));
-    view_->verticalHeader()->setDefaultSectionSize(metrics.height() + 6);
-    view_->verticalHeader()->setSectionResizeMode(QHeaderView::Fixed);
+}
+
+void LedgerPanel::changeEvent(QEvent* event) {
+    PanelFrame::changeEvent(event);
+    if (event->type() == QEvent::PaletteChange) {
+        dressHeader();
+    }
 }
 
 void LedgerPanel::setContent(const PaneContent& content) {
@@ -208,8 +219,7 @@ bool LedgerPanel::eventFilter(QObject* watched, QEvent* event) {
             break;
         }
     }
-    if (event->type() == QEvent::ApplicationFontChange || event->type() == QEvent::FontChange ||
-        event->type() == QEvent::ApplicationPaletteChange) {
+    if (event->type() == QEvent::ApplicationFontChange || event->type() == QEvent::FontChange) {
         fitColumns();
     }
     return PanelFrame::eventFilter(watched, event);

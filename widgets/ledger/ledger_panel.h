@@ -35,10 +35,12 @@ class LedgerPanel : public PanelFrame {
 
   protected:
     bool eventFilter(QObject* watched, QEvent* event) override;
+    void changeEvent(QEvent* event) override;
 
   private:
     void buildView();
     void fitColumns();
+    void dressHeader();
     void goToWorst(int row);
     void edit(std::size_t requirement);
     void endEditing();

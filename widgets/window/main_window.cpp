@@ -36,6 +36,7 @@ namespace cornerwright {
 namespace {
 
 constexpr QSize firstSize(1600, 950);
+const QString groundKey = QStringLiteral("ground");
 const QString geometryKey = QStringLiteral("geometry");
 
 QStringList localPaths(const QMimeData& data) {
@@ -115,8 +116,9 @@ void MainWindow::connectActions() {
     connect(actions_->redo, &QAction::triggered, &document_, &Document::redo);
     connect(actions_->addFormula, &QAction::triggered, cases_, &CasesPanel::beginFormula);
     connect(actions_->hertz, &QAction::toggled, &viewState_, &ViewState::setShowsHertz);
-    connect(actions_->grounds, &QActionGroup::triggered, this, [](const QAction* action) {
+    connect(actions_->grounds, &QActionGroup::triggered, this, [this](const QAction* action) {
         applyAppearance(static_cast<Ground>(action->data().toInt()));
+        settings_.setValue(groundKey, action->data());
     });
     connect(actions_->nextCase, &QAction::triggered, this, [this] { stepCase(1); });
     connect(actions_->previousCase, &QAction::triggered, this, [this] { stepCase(-1); });
@@ -321,6 +323,10 @@ void MainWindow::setWholePane() {
         widget = widget->parentWidget();
     }
     area_->setWhole(widget != nullptr && widget != area_->whole() ? widget : nullptr);
+}
+
+Ground MainWindow::rememberedGround() const {
+    return static_cast<Ground>(settings_.value(groundKey, 0).toInt());
 }
 
 void MainWindow::closeEvent(QCloseEvent* event) {

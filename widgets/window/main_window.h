@@ -4,6 +4,7 @@
 #include "widgets/document/live_content.h"
 #include "widgets/trials/trial_book.h"
 #include "widgets/view_state.h"
+#include "widgets/window/appearance.h"
 
 #include <QMainWindow>
 #include <QSettings>
@@ -40,6 +41,9 @@ class MainWindow : public QMainWindow {
 
     explicit MainWindow(const Places& places, QWidget* parent = nullptr);
     ~MainWindow() override;
+
+    /// The ground that was chosen in this window last.
+    Ground rememberedGround() const;
 
     Document& document() { return document_; }
     ViewState& viewState() { return viewState_; }

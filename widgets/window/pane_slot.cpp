@@ -37,15 +37,13 @@ PaneSlot::PaneSlot(bool canSwitch, QWidget* parent)
     name_->setToolButtonStyle(Qt::ToolButtonTextOnly);
     name_->setFont(fontOf(FontRole::strong));
     if (canSwitch) {
-        auto* menu = new QMenu(name_);
-        name_->setMenu(menu);
-        // The mark stands in the text: the style's own sits in the corner and is easily missed.
-        name_->setStyleSheet(QStringLiteral("QToolButton::menu-indicator { image: none; }"));
-        name_->setPopupMode(QToolButton::InstantPopup);
+        // Not as the button's own menu: that draws a small mark over the text.
+        menu_ = new QMenu(name_);
         name_->setToolTip(tr("Show another pane here"));
-        connect(menu, &QMenu::aboutToShow, this, [this, menu] {
-            menu->clear();
-            Q_EMIT menuAsked(menu);
+        connect(name_, &QToolButton::clicked, this, &PaneSlot::openMenu);
+        connect(menu_, &QMenu::aboutToShow, this, [this] {
+            menu_->clear();
+            Q_EMIT menuAsked(menu_);
         });
     } else {
         name_->setFocusPolicy(Qt::NoFocus);
@@ -65,8 +63,7 @@ void PaneSlot::setPane(Pane* pane) {
     if (pane_ == nullptr) {
         return;
     }
-    name_->setText(name_->menu() != nullptr ? pane_->title() + QStringLiteral(" ▾")
-                                            : pane_->title());
+    name_->setText(menu_ != nullptr ? pane_->title() + QStringLiteral(" ▾") : pane_->title());
     name_->setAccessibleName(tr("Pane: %1").arg(pane_->title()));
     whole_->setAccessibleName(tr("%1: take the whole window").arg(pane_->title()));
     headWidget_ = pane_->headWidget();
@@ -98,8 +95,8 @@ void PaneSlot::setWhole(bool whole) {
 }
 
 void PaneSlot::openMenu() {
-    if (name_->menu() != nullptr) {
-        name_->showMenu();
+    if (menu_ != nullptr) {
+        menu_->popup(name_->mapToGlobal(QPoint(0, name_->height())));
     }
 }
 

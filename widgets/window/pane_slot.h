@@ -3,6 +3,7 @@
 #include <QFrame>
 
 class QHBoxLayout;
+class QMenu;
 class QToolButton;
 class QVBoxLayout;
 
@@ -42,6 +43,7 @@ class PaneSlot : public QFrame {
     Pane* pane_ = nullptr;
     QWidget* headWidget_ = nullptr;
     QToolButton* name_;
+    QMenu* menu_ = nullptr;
     GlyphButton* whole_;
     QHBoxLayout* head_;
     QVBoxLayout* body_;

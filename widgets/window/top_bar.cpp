@@ -5,7 +5,6 @@
 #include "widgets/window/window_actions.h"
 
 #include <QEvent>
-#include <QFrame>
 #include <QHBoxLayout>
 #include <QMenu>
 #include <QPainter>
@@ -19,6 +18,18 @@ constexpr int longestCaseName = 24;
 QString shortened(const QString& text) {
     return text.size() <= longestCaseName ? text : text.left(longestCaseName - 1) + QChar(0x2026);
 }
+
+/// A hairline between groups of commands.
+class DividingLine : public QWidget {
+  public:
+    explicit DividingLine(QWidget* parent) : QWidget(parent) { setFixedWidth(1); }
+
+  protected:
+    void paintEvent(QPaintEvent*) override {
+        QPainter(this).fillRect(rect(), Theme::of(palette()).colour(ColourRole::hairline));
+    }
+};
+
 } // namespace
 
 TopBar::TopBar(const WindowActions& actions, QWidget* parent)
@@ -42,14 +53,18 @@ TopBar::TopBar(const WindowActions& actions, QWidget* parent)
     addLine(row);
     for (QToolButton* button : {case_, trial_}) {
         button->setAutoRaise(true);
-        button->setPopupMode(QToolButton::InstantPopup);
         button->setToolButtonStyle(Qt::ToolButtonTextOnly);
         button->setFocusPolicy(Qt::TabFocus);
     }
-    case_->setMenu(caseMenu_);
     case_->setToolTip(tr("The case drawn full, with the handles on its curve"));
-    trial_->setMenu(trialMenu_);
     trial_->setToolTip(tr("A kept trial to compare with"));
+    // Not as the buttons' own menus: those draw a small mark over the text.
+    for (const auto& [button, menu] :
+         {std::pair(case_, caseMenu_), std::pair(trial_, trialMenu_)}) {
+        connect(button, &QToolButton::clicked, menu, [button = button, menu = menu] {
+            menu->popup(button->mapToGlobal(QPoint(0, button->height())));
+        });
+    }
     row->addWidget(case_);
     addLine(row);
     row->addWidget(trial_);
@@ -74,8 +89,7 @@ void TopBar::changeEvent(QEvent* event) {
 }
 
 void TopBar::dress() {
-    // The unit counts for every number on the screen, so it stands out; names of menus end in a
-    // mark of their own instead of the small one in the corner.
+    // The unit counts for every number on the screen, so it stands out.
     const Theme& theme = Theme::of(palette());
     constexpr double tint = 0.1;
     hertz_->setStyleSheet(QStringLiteral("QToolButton { color: %1; background: %2; border: 1px "
@@ -83,9 +97,6 @@ void TopBar::dress() {
                                          "QToolButton:focus { border-width: 2px; }")
                               .arg(theme.colour(ColourRole::accent).name(),
                                    theme.faint(ColourRole::accent, tint).name()));
-    for (QToolButton* button : {case_, trial_}) {
-        button->setStyleSheet(QStringLiteral("QToolButton::menu-indicator { image: none; }"));
-    }
 }
 
 QToolButton* TopBar::addButton(QHBoxLayout* row, QAction* action) {
@@ -100,12 +111,7 @@ QToolButton* TopBar::addButton(QHBoxLayout* row, QAction* action) {
 }
 
 void TopBar::addLine(QHBoxLayout* row) {
-    auto* line = new QFrame(this);
-    line->setFrameShape(QFrame::VLine);
-    line->setFrameShadow(QFrame::Plain);
-    QPalette colours;
-    colours.setColor(QPalette::WindowText, Theme::of(palette()).colour(ColourRole::hairline));
-    line->setPalette(colours);
+    auto* line = new DividingLine(this);
     row->addSpacing(5);
     row->addWidget(line);
     row->addSpacing(5);
