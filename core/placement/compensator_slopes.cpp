@@ -11,6 +11,8 @@ constexpr double difference_step = 1e-5;
 RootForm unrounded_roots(const PlacementProblem& problem, const Chain& chain) {
     Realisation realisation = *problem.realisation;
     realisation.number_format = NumberFormat{};
+    // Whose coefficients keep their digits where corners are far below the sample rate.
+    realisation.structure = Structure::delta;
     return roots_in_z_minus_1(
         discretise(chain, problem.sampling.value_or(Sampling{}), realisation));
 }

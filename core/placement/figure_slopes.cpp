@@ -107,11 +107,35 @@ std::vector<double> bandwidth_slopes(const PlacementLoop& loop, const Here& here
     return result;
 }
 
+/// The crossover whose lag to -180 deg is used up by the shortest delay.
+Figure delay_margin_place(const PlacementLoop& loop) {
+    const FrequencyFigures& figures = loop.assessment.figures.frequency;
+    if (!figures.delay_margin_s.is_value())
+        return {};
+    const auto points = std::visit(
+        [&](const auto& l) { return loop_points(l, figures.crossovers_rad_s); }, loop.loop);
+    Figure place;
+    double nearest = HUGE_VAL;
+    for (const LoopPoint& point : points) {
+        double lag = std::arg(-point.loop);
+        if (lag <= 0.0)
+            lag += 2.0 * std::numbers::pi;
+        const double away = std::abs(lag / point.w_rad_s - figures.delay_margin_s.value());
+        if (away < nearest) {
+            nearest = away;
+            place = Figure::of(point.w_rad_s);
+        }
+    }
+    return place;
+}
+
 } // namespace
 
 std::optional<std::vector<double>> figure_slopes(const PlacementLoop& loop, Measure measure,
-                                                 const Figure& at_rad_s,
+                                                 const Figure& judged_at_rad_s,
                                                  const CompensatorSlopes& slopes) {
+    const Figure at_rad_s =
+        measure == Measure::delay_margin ? delay_margin_place(loop) : judged_at_rad_s;
     if (!at_rad_s.is_value() || at_rad_s.value() <= 0.0)
         return {};
     const FrequencyFigures& figures = loop.assessment.figures.frequency;
