@@ -1,7 +1,12 @@
 #include "core/placement/problem.h"
 
+#include "core/loop/closed_loop_poles.h"
+#include "core/loop/frequency_figures.h"
+
 #include <algorithm>
 #include <cmath>
+#include <span>
+#include <type_traits>
 
 namespace cornerwright {
 namespace {
@@ -15,6 +20,40 @@ double instability_of(const LoopFigures& figures) {
             worst = std::max(worst, figures.poles_in_z ? 1.0 - 1.0 / size : pole.real() / size);
     }
     return worst;
+}
+
+bool is_of_time(const Requirement& requirement) {
+    switch (requirement.measure) {
+    case Measure::overshoot:
+    case Measure::peak_time:
+    case Measure::rise_time:
+    case Measure::settling_time:
+    case Measure::control_peak:
+    case Measure::disturbance_peak:
+        return true;
+    default:
+        return false;
+    }
+}
+
+/// As `assess_loop`, but a step response is only made where a requirement judges one: it takes most
+/// of the time.
+template <typename Loop>
+LoopAssessment assess_as_required(const Loop& loop, const FigureRequest& request,
+                                  std::span<const Requirement> requirements) {
+    if (std::any_of(requirements.begin(), requirements.end(), is_of_time))
+        return assess_loop(loop, request);
+    const ClosedLoopPoles poles = closed_loop_poles(loop);
+    FrequencyAssessment frequency = assess_frequency(loop, request, poles.poles);
+    LoopAssessment result = undetermined_loop(request, "no requirement asks for it");
+    result.figures.stability = std::move(frequency.stability);
+    result.figures.frequency = std::move(frequency.figures);
+    if (result.figures.stability.stable == true)
+        result.figures.steady_state_error = std::move(frequency.steady_state_error);
+    result.figures.closed_loop_poles = poles.poles;
+    result.figures.poles_in_z = std::is_same_v<Loop, RealisedLoop>;
+    result.curves = std::move(frequency.curves);
+    return result;
 }
 
 double merit_of(const Evaluation& evaluation) {
@@ -64,10 +103,11 @@ Evaluation evaluate(const PlacementProblem& problem, const Chain& chain) {
     evaluation.request = request_of(problem.requirements);
     for (std::size_t i = 0; i < problem.plants.size(); ++i) {
         DesignLoop design = design_loop_with(problem, i, chain);
-        LoopAssessment assessed = assess_loop(design, evaluation.request);
+        LoopAssessment assessed =
+            assess_as_required(design, evaluation.request, problem.requirements);
         evaluation.loops.push_back({i, LoopName::design, std::move(design), std::move(assessed)});
         if (auto realised = realised_loop_with(problem, i, chain)) {
-            assessed = assess_loop(*realised, evaluation.request);
+            assessed = assess_as_required(*realised, evaluation.request, problem.requirements);
             evaluation.loops.push_back(
                 {i, LoopName::realised, std::move(*realised), std::move(assessed)});
         }

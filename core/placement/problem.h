@@ -55,6 +55,7 @@ DesignLoop design_loop_with(const PlacementProblem& problem, std::size_t plant, 
 std::optional<RealisedLoop> realised_loop_with(const PlacementProblem& problem, std::size_t plant,
                                                const Chain& chain);
 
+/// Figures of the step response are only determined where a requirement asks for one of them.
 /// Judges `chain` in place of the problem's compensator. Throws InputError as above.
 Evaluation evaluate(const PlacementProblem& problem, const Chain& chain);
 
