@@ -1,0 +1,180 @@
+#include "core/loop/frequency_figures.h"
+#include "core/numerics/bracketed_root.h"
+#include "core/numerics/number_text.h"
+#include "core/placement/design_practice.h"
+
+#include <array>
+#include <cmath>
+#include <numbers>
+
+namespace cornerwright {
+namespace {
+
+constexpr double radians = std::numbers::pi / 180.0;
+/// More than this asks for corners so far apart that two sections do it with less gain.
+constexpr double most_of_one_deg = 60.0;
+constexpr int most_sections = 2;
+
+double ratio_of(double lift_deg) {
+    const double sine = std::sin(lift_deg * radians);
+    return (1.0 + sine) / (1.0 - sine);
+}
+
+double log_size(const PlacementLoop& loop, double w) {
+    const std::array<double, 1> one{w};
+    const auto points = std::visit([&](const auto& l) { return loop_points(l, one); }, loop.loop);
+    return std::log(std::abs(points.front().loop));
+}
+
+/// Where |L| last falls through exp(level) on its way up in frequency, from its grid and polished.
+std::optional<double> falls_through(const PlacementLoop& loop, double level) {
+    const LoopCurves& curves = loop.assessment.curves;
+    const auto size = [&](std::size_t i) { return std::log(std::abs(curves.loop[i])) - level; };
+    for (std::size_t i = curves.w_rad_s.size(); i-- > 1;) {
+        if (size(i - 1) < 0.0 || size(i) >= 0.0)
+            continue;
+        const auto f = [&](double ln_w) { return log_size(loop, std::exp(ln_w)) - level; };
+        const double a = std::log(curves.w_rad_s[i - 1]);
+        const double b = std::log(curves.w_rad_s[i]);
+        const double fa = f(a);
+        const double fb = f(b);
+        if ((fa < 0.0) == (fb < 0.0))
+            return curves.w_rad_s[i];
+        return std::exp(bracketed_root(f, a, fa, b, fb));
+    }
+    return {};
+}
+
+Requirement margin_wanted(double deg) {
+    Requirement requirement;
+    requirement.measure = Measure::phase_margin;
+    requirement.at_least = deg;
+    return requirement;
+}
+
+/// The loop with the smallest phase margin, unstable ones (below zero) included.
+const PlacementLoop* worst_loop(const Evaluation& evaluation) {
+    const PlacementLoop* worst = nullptr;
+    double smallest = HUGE_VAL;
+    for (const PlacementLoop& loop : evaluation.loops) {
+        const Figure& margin = loop.assessment.figures.frequency.phase_margin_deg;
+        if (margin.is_value() && margin.value() < smallest) {
+            smallest = margin.value();
+            worst = &loop;
+        }
+    }
+    return worst;
+}
+
+Chain with_leads(const Chain& chain, const LeadEstimate& lead) {
+    Section section;
+    section.kind = SectionKind::lead;
+    section.zero_rad_s = lead.centre_rad_s / std::sqrt(lead.ratio);
+    section.pole_rad_s = lead.centre_rad_s * std::sqrt(lead.ratio);
+    Chain result = chain;
+    result.insert(result.end(), static_cast<std::size_t>(lead.sections), section);
+    return result;
+}
+
+std::optional<LeadEstimate> lead_for(const PlacementLoop& worst, double lift_deg, int sections) {
+    LeadEstimate lead{lift_deg, sections, ratio_of(lift_deg), 0.0};
+    const auto centre = falls_through(worst, -0.5 * sections * std::log(lead.ratio));
+    if (!centre)
+        return {};
+    lead.centre_rad_s = *centre;
+    return lead;
+}
+
+/// The least lift by `sections` leads with which every margin is the wanted one.
+std::optional<LeadEstimate> solved(const PlacementProblem& problem, const PlacementLoop& worst,
+                                   double wanted_deg, int sections) {
+    const PlacementProblem judged = with_only(problem, margin_wanted(wanted_deg));
+    // Undetermined (unstable, or no place for the centre) counts as far short.
+    constexpr double far_short = -360.0;
+    const auto excess = [&](double lift_deg) {
+        const auto lead = lead_for(worst, lift_deg, sections);
+        if (!lead)
+            return far_short;
+        const Figure margin = worst_figure(judged, with_leads(problem.compensator, *lead));
+        return margin.is_value() ? margin.value() - wanted_deg : far_short;
+    };
+    constexpr double stride_deg = 2.5;
+    double below = 0.5;
+    double excess_below = excess(below);
+    for (double lift = stride_deg; lift <= most_of_one_deg; lift += stride_deg) {
+        const double here = excess(lift);
+        if (here >= 0.0 && excess_below < 0.0)
+            return lead_for(worst, bracketed_root(excess, below, excess_below, lift, here),
+                            sections);
+        below = lift;
+        excess_below = here;
+    }
+    return {};
+}
+
+std::string pair_words(const LeadEstimate& lead) {
+    return "zero at " + number_text(lead.centre_rad_s / std::sqrt(lead.ratio), 4) +
+           " rad/s, pole at " + number_text(lead.centre_rad_s * std::sqrt(lead.ratio), 4) +
+           " rad/s";
+}
+
+} // namespace
+
+std::optional<LeadEstimate> lead_estimate(const PlacementProblem& problem,
+                                          const PhaseLift& wanted) {
+    const Evaluation evaluation =
+        evaluate(with_only(problem, margin_wanted(wanted.phase_margin_deg)), problem.compensator);
+    const PlacementLoop* worst = worst_loop(evaluation);
+    if (!worst)
+        return {};
+    const double present = worst->assessment.figures.frequency.phase_margin_deg.value();
+    const double lift = wanted.phase_margin_deg - present + wanted.allowance_deg;
+    if (present >= wanted.phase_margin_deg || lift > most_sections * most_of_one_deg)
+        return {};
+    const int sections = lift > most_of_one_deg ? 2 : 1;
+    return lead_for(*worst, lift / sections, sections);
+}
+
+SectionProposal lift_phase(const PlacementProblem& problem, const PhaseLift& wanted) {
+    const PlacementProblem judged = with_only(problem, margin_wanted(wanted.phase_margin_deg));
+    const Evaluation evaluation = evaluate(judged, problem.compensator);
+    const PlacementLoop* worst = worst_loop(evaluation);
+    if (!worst)
+        return impossible(problem, {"No loop crosses 0 dB, so there is no phase margin to lift."});
+    const double present = worst->assessment.figures.frequency.phase_margin_deg.value();
+    const std::string name = problem.plants[worst->plant].name;
+    if (present >= wanted.phase_margin_deg && evaluation.merit > unstable_merit)
+        return impossible(problem, {"The phase margin is " + number_text(present, 4) + " deg on " +
+                                    name + ", the worst case: nothing to lift."});
+    const auto estimate = lead_estimate(problem, wanted);
+    for (int sections = estimate ? estimate->sections : 1; sections <= most_sections; ++sections) {
+        const auto lead = solved(problem, *worst, wanted.phase_margin_deg, sections);
+        if (!lead)
+            continue;
+        SectionProposal proposal{true, with_leads(problem.compensator, *lead), {}, {}};
+        for (std::size_t i = problem.compensator.size(); i < proposal.compensator.size(); ++i)
+            proposal.added.push_back(i);
+        proposal.words.push_back("The worst case is " + name + " with " + number_text(present, 4) +
+                                 " deg.");
+        if (estimate)
+            proposal.words.push_back(
+                "First cut with an allowance of " + number_text(wanted.allowance_deg, 3) +
+                " deg: " + number_text(estimate->lift_deg * estimate->sections, 4) + " deg, " +
+                pair_words(*estimate) + ".");
+        proposal.words.push_back("Solved so that " + number_text(wanted.phase_margin_deg, 4) +
+                                 " deg is met on every case: " + std::to_string(sections) +
+                                 (sections == 1 ? " lead, " : " equal leads, ") +
+                                 number_text(lead->lift_deg, 4) + " deg, " + pair_words(*lead) +
+                                 ".");
+        return proposal;
+    }
+    std::vector<std::string> words{"Even two leads of " + number_text(most_of_one_deg, 3) +
+                                   " deg do not give " + number_text(wanted.phase_margin_deg, 4) +
+                                   " deg on every case (" + name + " has " +
+                                   number_text(present, 4) + " deg)."};
+    for (std::string& limit : limits_of_physics(problem, evaluation))
+        words.push_back(std::move(limit));
+    return impossible(problem, std::move(words));
+}
+
+} // namespace cornerwright
