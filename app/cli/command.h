@@ -32,6 +32,8 @@ void add_curves(CLI::App& program, int& status);
 void add_step(CLI::App& program, int& status);
 void add_locus(CLI::App& program, int& status);
 void add_read(CLI::App& program, int& status);
+void add_place(CLI::App& program, int& status);
+void add_fleet(CLI::App& program, int& status);
 
 /// Loads a project and tells its notices on standard error.
 Project load_telling_notices(const std::string& file);

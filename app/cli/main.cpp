@@ -19,6 +19,8 @@ int run(int argc, char** argv) {
     add_step(program, status);
     add_locus(program, status);
     add_read(program, status);
+    add_place(program, status);
+    add_fleet(program, status);
     try {
         program.parse(argc, argv);
     } catch (const CLI::ParseError& error) {
