@@ -2,7 +2,6 @@
 
 #include "core/loop/frequency_figures.h"
 
-#include <array>
 #include <cmath>
 #include <numbers>
 
@@ -35,22 +34,22 @@ bool is_measured(const std::variant<DesignLoop, RealisedLoop>& loop) {
                       loop);
 }
 
-/// d ln L / dw by central differences: a relative error near 1e-9 on smooth curves.
-Complex slope_along(const std::variant<DesignLoop, RealisedLoop>& loop, double w) {
-    constexpr double step = difference_step;
-    const std::array<double, 2> both{w * (1.0 - step), w * (1.0 + step)};
-    const auto points = std::visit([&](const auto& l) { return loop_points(l, both); }, loop);
-    return std::log(points[1].loop / points[0].loop) / (2.0 * step * w);
-}
-
 Here look_at(const PlacementLoop& loop, double w, const CompensatorSlopes& slopes, bool along) {
-    const std::array<double, 1> one{w};
     Here here;
     here.w = w;
-    here.point = std::visit([&](const auto& l) { return loop_points(l, one); }, loop.loop).front();
     here.stands_still = is_at_half_rate(loop.loop, w);
-    if (along && !here.stands_still)
-        here.along = slope_along(loop.loop, w);
+    along = along && !here.stands_still;
+    constexpr double step = difference_step;
+    std::vector<double> places{w};
+    if (along)
+        places.insert(places.end(), {w * (1.0 - step), w * (1.0 + step)});
+    // All in one call: the loop's curve is made for each.
+    const auto points =
+        std::visit([&](const auto& l) { return loop_points(l, places); }, loop.loop);
+    here.point = points.front();
+    // Central differences: a relative error near 1e-9 on smooth curves.
+    if (along)
+        here.along = std::log(points[2].loop / points[1].loop) / (2.0 * step * w);
     here.by_parameter = loop.name == LoopName::design ? slopes.design(w) : slopes.realised(w);
     return here;
 }

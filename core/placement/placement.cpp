@@ -52,13 +52,15 @@ class Search {
         if (!given)
             throw InputError({}, "a compensator that can be realised as the project asks",
                              "one that cannot");
+        if (given->evaluation.merit == HUGE_VAL && given->evaluation.undetermined > 0)
+            throw InputError({}, "a requirement that can be judged", "none that is determined");
         PlacementResult result;
         result.merit_before = given->evaluation.merit;
         Place best = climb(*given);
         for (int start = 1; start < options_.starts && may_go_on(start, best); ++start) {
             if (const auto varied = variation(best)) {
                 Place found = climb(*varied);
-                if (found.evaluation.merit > best.evaluation.merit)
+                if (is_better(found.evaluation, best.evaluation))
                     best = std::move(found);
             }
         }
@@ -120,7 +122,7 @@ class Search {
             for (double& logarithm : logarithms)
                 logarithm += normal(random_);
             auto place = visit(inside(room_, std::move(logarithms)));
-            if (place && (!chosen || place->evaluation.merit > chosen->evaluation.merit))
+            if (place && (!chosen || is_better(place->evaluation, chosen->evaluation)))
                 chosen = std::move(place);
         }
         return chosen;
@@ -137,7 +139,7 @@ class Search {
                 for (double& logarithm : logarithms)
                     logarithm += normal(random_);
                 const auto place = visit(inside(room_, std::move(logarithms)));
-                if (place && place->evaluation.merit > at.evaluation.merit)
+                if (place && is_better(place->evaluation, at.evaluation))
                     at = *place;
             }
             if (!proceed(start_, 0.0, at))
@@ -167,8 +169,9 @@ class Search {
                 break;
             auto next = visit(inside(room_, sum(at.logarithms, move->move)));
             const double gained = next ? next->evaluation.merit - at.evaluation.merit : -HUGE_VAL;
-            radius = next_radius(radius, gained / predicted);
-            fresh = gained > 0.0;
+            const bool lost = next && next->evaluation.undetermined > at.evaluation.undetermined;
+            radius = next_radius(radius, lost ? -HUGE_VAL : gained / predicted);
+            fresh = next && is_better(next->evaluation, at.evaluation);
             if (fresh) {
                 next->weights = at.weights;
                 next->gradients = std::move(at.gradients);

@@ -117,7 +117,19 @@ Evaluation evaluate(const PlacementProblem& problem, const Chain& chain) {
         judged.push_back({problem.plants[loop.plant].name, loop.name, &loop.assessment.figures});
     evaluation.verdict = judge(problem.requirements, evaluation.request, judged);
     evaluation.merit = merit_of(evaluation);
+    for (const RequirementResult& result : evaluation.verdict.requirements)
+        evaluation.undetermined += static_cast<std::size_t>(
+            std::count_if(result.all.begin(), result.all.end(), [](const Judgement& judgement) {
+                return !judgement.share.is_determined();
+            }));
     return evaluation;
+}
+
+bool is_better(const Evaluation& a, const Evaluation& b) {
+    const bool both_stable = a.merit > unstable_merit && b.merit > unstable_merit;
+    if (both_stable && a.undetermined != b.undetermined)
+        return a.undetermined < b.undetermined;
+    return a.merit > b.merit;
 }
 
 } // namespace cornerwright

@@ -45,9 +45,15 @@ struct Evaluation {
     /// The smallest share over all requirements, plants and loops that are determined. Where a loop
     /// is not stable: below `unstable_merit`, the lower the farther its poles are from the left.
     double merit = 0.0;
+    /// How many judgements are not determined: a place where fewer are is the better one, or a
+    /// search would flee to where nothing can be told.
+    std::size_t undetermined = 0;
 };
 
 inline constexpr double unstable_merit = -1e3;
+
+/// Stable before unstable, then fewer judgements undetermined, then the larger merit.
+bool is_better(const Evaluation& a, const Evaluation& b);
 
 /// The design loop, or the realised one, of a plant with this compensator. Throws InputError where
 /// the difference equation cannot be made.
