@@ -3,6 +3,8 @@
 #include "widgets/handover/realisation_pane.h"
 #include "widgets/panes/magnitude_pane.h"
 #include "widgets/panes/phase_pane.h"
+#include "widgets/panes/root_locus_pane.h"
+#include "widgets/panes/step_pane.h"
 #include "widgets/trials/trials_pane.h"
 #include "widgets/window/work_area.h"
 
@@ -12,6 +14,8 @@ void makePanes(WorkArea& area, ViewState& viewState, TrialBook& trials) {
     // The first four stand in the four places of a fresh window.
     area.addPane(QStringLiteral("magnitude"), new MagnitudePane(viewState, &area));
     area.addPane(QStringLiteral("phase"), new PhasePane(viewState, &area));
+    area.addPane(QStringLiteral("root-locus"), new RootLocusPane(viewState, &area));
+    area.addPane(QStringLiteral("step"), new StepPane(viewState, &area));
     area.addPane(QStringLiteral("handover"), new RealisationPane(viewState, &area));
     area.addPane(QStringLiteral("trials"), new TrialsPane(viewState, trials, &area));
 }
