@@ -21,6 +21,8 @@ struct CaseAssessment {
         unusable; ///< why nothing could be computed (missing file, broken model); else empty
     LoopAssessment design;
     std::optional<LoopAssessment> realised;
+
+    bool operator==(const CaseAssessment&) const = default;
 };
 
 /// Everything the panes, the ledger, the command line and the report show. Immutable once made.
@@ -32,6 +34,8 @@ struct Assessment {
         equation; ///< as realised, where the project has a realisation
     std::string
         realisation_problem; ///< why there is no difference equation though one is asked for
+
+    bool operator==(const Assessment&) const = default;
 };
 
 } // namespace cornerwright

@@ -12,6 +12,8 @@ struct LoopAssessment {
     LoopFigures figures;
     LoopCurves curves;
     StepCurves step;
+
+    bool operator==(const LoopAssessment&) const = default;
 };
 
 /// Every figure and curve of one loop, from its poles, its frequency response and, where it is
