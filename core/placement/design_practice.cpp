@@ -9,6 +9,17 @@
 #include <utility>
 
 namespace cornerwright {
+namespace {
+
+/// The model of a plant, or the one fitted to its measurement; null where there is neither.
+const PlantModel* known_model(const LoopPlant& plant) {
+    if (const auto* model = std::get_if<PlantModel>(&plant))
+        return model;
+    const auto& fit = std::get<MeasuredPlant>(plant).fit;
+    return fit ? &fit->model : nullptr;
+}
+
+} // namespace
 
 PlacementProblem with_only(const PlacementProblem& problem, const Requirement& requirement) {
     PlacementProblem result = problem;
@@ -64,7 +75,7 @@ std::vector<std::string> limits_of_physics(const PlacementProblem& problem,
     const auto crossover = lowest_crossover(evaluation);
     double delay = 0.0;
     for (const PlacementPlant& plant : problem.plants) {
-        const auto* model = std::get_if<PlantModel>(&plant.plant);
+        const PlantModel* model = known_model(plant.plant);
         if (!model)
             continue;
         delay = std::max(delay, model->dead_time_s);

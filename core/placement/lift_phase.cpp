@@ -20,10 +20,10 @@ double ratio_of(double lift_deg) {
     return (1.0 + sine) / (1.0 - sine);
 }
 
-double log_size(const PlacementLoop& loop, double w) {
+Complex value_at(const PlacementLoop& loop, double w) {
     const std::array<double, 1> one{w};
     const auto points = std::visit([&](const auto& l) { return loop_points(l, one); }, loop.loop);
-    return std::log(std::abs(points.front().loop));
+    return points.front().loop;
 }
 
 /// Where |L| last falls through exp(level) on its way up in frequency, from its grid and polished.
@@ -33,7 +33,9 @@ std::optional<double> falls_through(const PlacementLoop& loop, double level) {
     for (std::size_t i = curves.w_rad_s.size(); i-- > 1;) {
         if (size(i - 1) < 0.0 || size(i) >= 0.0)
             continue;
-        const auto f = [&](double ln_w) { return log_size(loop, std::exp(ln_w)) - level; };
+        const auto f = [&](double ln_w) {
+            return std::log(std::abs(value_at(loop, std::exp(ln_w)))) - level;
+        };
         const double a = std::log(curves.w_rad_s[i - 1]);
         const double b = std::log(curves.w_rad_s[i]);
         const double fa = f(a);
@@ -52,33 +54,62 @@ Requirement margin_wanted(double deg) {
     return requirement;
 }
 
-/// The loop with the smallest phase margin, unstable ones (below zero) included.
-const PlacementLoop* worst_loop(const Evaluation& evaluation) {
-    const PlacementLoop* worst = nullptr;
-    double smallest = HUGE_VAL;
-    for (const PlacementLoop& loop : evaluation.loops) {
-        const Figure& margin = loop.assessment.figures.frequency.phase_margin_deg;
-        if (margin.is_value() && margin.value() < smallest) {
-            smallest = margin.value();
-            worst = &loop;
-        }
-    }
-    return worst;
+/// 180 + arg L at a frequency, wrapped to (-180, 180].
+double phase_above_minus_180_deg(const PlacementLoop& loop, double w) {
+    return std::remainder(180.0 + std::arg(value_at(loop, w)) / radians, 360.0);
 }
 
-Chain with_leads(const Chain& chain, const LeadEstimate& lead) {
+/// The loop that decides, and the phase it has.
+struct Start {
+    const PlacementLoop* loop = nullptr;
+    double present_deg = HUGE_VAL;
+};
+
+/// Whether the loop's curve reaches that frequency (a measurement ends).
+bool reaches(const PlacementLoop& loop, double w) {
+    const std::vector<double>& grid = loop.assessment.curves.w_rad_s;
+    return !grid.empty() && grid.front() <= w && w <= grid.back();
+}
+
+/// The loop with the smallest phase margin, unstable ones (below zero) included; with a wanted
+/// crossover the one with the least phase there.
+Start worst_start(const Evaluation& evaluation, const PhaseLift& wanted) {
+    Start start;
+    for (const PlacementLoop& loop : evaluation.loops) {
+        Figure margin = loop.assessment.figures.frequency.phase_margin_deg;
+        if (wanted.crossover_rad_s && reaches(loop, *wanted.crossover_rad_s))
+            margin = Figure::of(phase_above_minus_180_deg(loop, *wanted.crossover_rad_s));
+        else if (wanted.crossover_rad_s)
+            continue;
+        if (margin.is_value() && margin.value() < start.present_deg)
+            start = {&loop, margin.value()};
+    }
+    return start;
+}
+
+Chain with_leads(const Chain& chain, const PlacementLoop& worst, const PhaseLift& wanted,
+                 const LeadEstimate& lead) {
     Section section;
     section.kind = SectionKind::lead;
     section.zero_rad_s = lead.centre_rad_s / std::sqrt(lead.ratio);
     section.pole_rad_s = lead.centre_rad_s * std::sqrt(lead.ratio);
     Chain result = chain;
+    if (wanted.crossover_rad_s) {
+        // At its centre a lead with unit gain at s = 0 is sqrt(ratio).
+        const double size = std::abs(value_at(worst, lead.centre_rad_s));
+        result =
+            with_gain_factor(std::move(result), std::pow(lead.ratio, -0.5 * lead.sections) / size);
+    }
     result.insert(result.end(), static_cast<std::size_t>(lead.sections), section);
     return result;
 }
 
-std::optional<LeadEstimate> lead_for(const PlacementLoop& worst, double lift_deg, int sections) {
+std::optional<LeadEstimate> lead_for(const PlacementLoop& worst, const PhaseLift& wanted,
+                                     double lift_deg, int sections) {
     LeadEstimate lead{lift_deg, sections, ratio_of(lift_deg), 0.0};
-    const auto centre = falls_through(worst, -0.5 * sections * std::log(lead.ratio));
+    const auto centre = wanted.crossover_rad_s
+                            ? wanted.crossover_rad_s
+                            : falls_through(worst, -0.5 * sections * std::log(lead.ratio));
     if (!centre)
         return {};
     lead.centre_rad_s = *centre;
@@ -87,24 +118,27 @@ std::optional<LeadEstimate> lead_for(const PlacementLoop& worst, double lift_deg
 
 /// The least lift by `sections` leads with which every margin is the wanted one.
 std::optional<LeadEstimate> solved(const PlacementProblem& problem, const PlacementLoop& worst,
-                                   double wanted_deg, int sections) {
+                                   const PhaseLift& wanted, int sections) {
+    const double wanted_deg = wanted.phase_margin_deg;
     const PlacementProblem judged = with_only(problem, margin_wanted(wanted_deg));
     // Undetermined (unstable, or no place for the centre) counts as far short.
     constexpr double far_short = -360.0;
     const auto excess = [&](double lift_deg) {
-        const auto lead = lead_for(worst, lift_deg, sections);
+        const auto lead = lead_for(worst, wanted, lift_deg, sections);
         if (!lead)
             return far_short;
-        const Figure margin = worst_figure(judged, with_leads(problem.compensator, *lead));
+        const Figure margin =
+            worst_figure(judged, with_leads(problem.compensator, worst, wanted, *lead));
         return margin.is_value() ? margin.value() - wanted_deg : far_short;
     };
     constexpr double stride_deg = 2.5;
-    double below = 0.5;
+    constexpr double least_deg = 1e-4; // a lead of no lift at all has no centre
+    double below = least_deg;
     double excess_below = excess(below);
     for (double lift = stride_deg; lift <= most_of_one_deg; lift += stride_deg) {
         const double here = excess(lift);
         if (here >= 0.0 && excess_below < 0.0)
-            return lead_for(worst, bracketed_root(excess, below, excess_below, lift, here),
+            return lead_for(worst, wanted, bracketed_root(excess, below, excess_below, lift, here),
                             sections);
         below = lift;
         excess_below = here;
@@ -124,34 +158,38 @@ std::optional<LeadEstimate> lead_estimate(const PlacementProblem& problem,
                                           const PhaseLift& wanted) {
     const Evaluation evaluation =
         evaluate(with_only(problem, margin_wanted(wanted.phase_margin_deg)), problem.compensator);
-    const PlacementLoop* worst = worst_loop(evaluation);
-    if (!worst)
+    const Start start = worst_start(evaluation, wanted);
+    if (!start.loop)
         return {};
-    const double present = worst->assessment.figures.frequency.phase_margin_deg.value();
-    const double lift = wanted.phase_margin_deg - present + wanted.allowance_deg;
-    if (present >= wanted.phase_margin_deg || lift > most_sections * most_of_one_deg)
+    const double lift = wanted.phase_margin_deg - start.present_deg + wanted.allowance_deg;
+    if (start.present_deg >= wanted.phase_margin_deg || lift > most_sections * most_of_one_deg)
         return {};
     const int sections = lift > most_of_one_deg ? 2 : 1;
-    return lead_for(*worst, lift / sections, sections);
+    return lead_for(*start.loop, wanted, lift / sections, sections);
 }
 
 SectionProposal lift_phase(const PlacementProblem& problem, const PhaseLift& wanted) {
     const PlacementProblem judged = with_only(problem, margin_wanted(wanted.phase_margin_deg));
     const Evaluation evaluation = evaluate(judged, problem.compensator);
-    const PlacementLoop* worst = worst_loop(evaluation);
-    if (!worst)
-        return impossible(problem, {"No loop crosses 0 dB, so there is no phase margin to lift."});
-    const double present = worst->assessment.figures.frequency.phase_margin_deg.value();
-    const std::string name = problem.plants[worst->plant].name;
-    if (present >= wanted.phase_margin_deg && evaluation.merit > unstable_merit)
+    const Start start = worst_start(evaluation, wanted);
+    if (!start.loop)
+        return impossible(problem, {wanted.crossover_rad_s
+                                        ? "No case reaches the wanted crossover."
+                                        : "No loop crosses 0 dB, so there is no phase margin to "
+                                          "lift."});
+    const double present = start.present_deg;
+    const std::string name = problem.plants[start.loop->plant].name;
+    const bool is_stable = evaluation.merit > unstable_merit;
+    if (present >= wanted.phase_margin_deg && (is_stable || wanted.crossover_rad_s))
         return impossible(problem, {"The phase margin is " + number_text(present, 4) + " deg on " +
                                     name + ", the worst case: nothing to lift."});
     const auto estimate = lead_estimate(problem, wanted);
     for (int sections = estimate ? estimate->sections : 1; sections <= most_sections; ++sections) {
-        const auto lead = solved(problem, *worst, wanted.phase_margin_deg, sections);
+        const auto lead = solved(problem, *start.loop, wanted, sections);
         if (!lead)
             continue;
-        SectionProposal proposal{true, with_leads(problem.compensator, *lead), {}, {}};
+        SectionProposal proposal{
+            true, with_leads(problem.compensator, *start.loop, wanted, *lead), {}, {}};
         for (std::size_t i = problem.compensator.size(); i < proposal.compensator.size(); ++i)
             proposal.added.push_back(i);
         proposal.words.push_back("The worst case is " + name + " with " + number_text(present, 4) +

@@ -27,6 +27,9 @@ struct LeadEstimate {
 struct PhaseLift {
     double phase_margin_deg = 45.0;
     double allowance_deg = 10.0; ///< for the crossover that moves up; common practice is 5 to 12
+    /// Where the loop of the worst case shall cross 0 dB, rad/s: the centre stands there and the
+    /// gain goes along. Empty: the gain stays and the crossover moves up.
+    std::optional<double> crossover_rad_s;
 };
 
 /// The first cut of `lift_phase`: lift = wanted - present + allowance, ratio = (1 + sin lift)/
