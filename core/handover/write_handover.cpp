@@ -9,53 +9,40 @@ namespace {
 
 namespace fs = std::filesystem;
 
-/// A folder of its own for the files on their way; gone again whatever happens.
-class Staging {
+/// The folder and those above it that were missing; those that stay empty go with the object.
+class MadeFolder {
   public:
-    explicit Staging(fs::path place) : place_(std::move(place)) {
+    explicit MadeFolder(const fs::path& folder) {
         std::error_code problem;
-        fs::remove_all(place_, problem); // what a power cut may have left
-        fs::create_directories(place_, problem);
-        if (problem)
-            throw WriteError("cannot write into the folder " + place_.parent_path().string() +
-                             ": " + problem.message());
+        for (fs::path missing = folder; !missing.empty() && !fs::exists(missing, problem);
+             missing = missing.parent_path())
+            made_.push_back(missing);
+        fs::create_directories(folder, problem);
+        if (std::error_code ignored; problem || !fs::is_directory(folder, ignored))
+            throw WriteError("could not make the folder " + folder.string() + ": " +
+                             (problem ? problem.message() : "a file of that name stands there"));
     }
-    ~Staging() {
-        std::error_code ignored;
-        fs::remove_all(place_, ignored);
+    ~MadeFolder() {
+        std::error_code not_empty; // then it stays, as it should
+        for (const fs::path& folder : made_)
+            fs::remove(folder, not_empty);
     }
-    Staging(const Staging&) = delete;
-    Staging& operator=(const Staging&) = delete;
-
-    fs::path path_of(const std::string& name) const { return place_ / name; }
+    MadeFolder(const MadeFolder&) = delete;
+    MadeFolder& operator=(const MadeFolder&) = delete;
 
   private:
-    fs::path place_;
+    std::vector<fs::path> made_; ///< the innermost first
 };
-
-void check_targets(const std::vector<HandoverFile>& files, const fs::path& folder) {
-    for (const HandoverFile& file : files) {
-        std::error_code problem;
-        if (fs::is_directory(folder / file.name, problem))
-            throw WriteError("cannot write " + (folder / file.name).string() +
-                             ": a folder of that name stands there");
-    }
-}
 
 } // namespace
 
 void write_handover(const std::vector<HandoverFile>& files, const fs::path& folder) {
-    check_targets(files, folder);
-    const Staging staging(folder / (files.front().name + ".unfinished"));
+    const MadeFolder made(folder);
+    std::vector<FileContent> contents;
+    contents.reserve(files.size());
     for (const HandoverFile& file : files)
-        write_file(staging.path_of(file.name), file.bytes);
-    for (const HandoverFile& file : files) {
-        std::error_code problem;
-        fs::rename(staging.path_of(file.name), folder / file.name, problem);
-        if (problem)
-            throw WriteError("cannot write " + (folder / file.name).string() + ": " +
-                             problem.message());
-    }
+        contents.push_back({folder / file.name, file.bytes});
+    write_files(contents);
 }
 
 } // namespace cornerwright

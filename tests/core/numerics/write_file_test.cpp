@@ -68,5 +68,51 @@ TEST(WriteFile, ATargetThatCannotBeWrittenIsNamed) {
     EXPECT_THAT(refusal_of("/dev/full"), HasSubstr("not a regular file"));
 }
 
+std::string refusal_of(std::span<const FileContent> files) {
+    try {
+        write_files(files);
+    } catch (const WriteError& error) {
+        return error.what();
+    }
+    return {};
+}
+
+TEST(WriteFiles, WritesAllAndLeavesNothingBeside) {
+    const TemporaryFolder folder;
+    const auto first = folder.write("a.h", "old");
+    const auto second = folder.path() / "a.c";
+    write_files(std::vector<FileContent>{{first, "one"}, {second, "two"}});
+    EXPECT_EQ(TemporaryFolder::read(first), "one");
+    EXPECT_EQ(TemporaryFolder::read(second), "two");
+    EXPECT_EQ(files_in(folder.path()), 2U);
+}
+
+TEST(WriteFiles, WriteNoneWhereOneCannotBeWritten) {
+    const TemporaryFolder folder;
+    const auto first = folder.write("a.h", "old");
+    const auto second = folder.path() / "new.c";
+    const auto blocked = folder.path() / "b.c";
+    fs::create_directory(blocked);
+    const std::vector<FileContent> files{{first, "one"}, {second, "two"}, {blocked, "three"}};
+    EXPECT_THAT(refusal_of(files), HasSubstr("b.c: it is not a regular file"));
+    EXPECT_EQ(TemporaryFolder::read(first), "old");
+    EXPECT_FALSE(fs::exists(second));
+    EXPECT_EQ(files_in(folder.path()), 2U);
+}
+
+/// A rename that fails in the middle: the same place twice, so that the second has nothing left to
+/// rename.
+TEST(WriteFiles, PutBackWhatWasAlreadyRenamed) {
+    const TemporaryFolder folder;
+    const auto before = folder.write("a.h", "old");
+    const auto made = folder.path() / "new.c";
+    const auto twice = folder.path() / "b.c";
+    const std::vector<FileContent> files{
+        {before, "one"}, {made, "two"}, {twice, "three"}, {twice, "four"}};
+    EXPECT_THAT(refusal_of(files), HasSubstr("b.c"));
+    EXPECT_EQ(TemporaryFolder::read(before), "old");
+    EXPECT_EQ(files_in(folder.path()), 1U);
+}
+
 } // namespace
 } // namespace cornerwright
