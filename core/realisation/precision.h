@@ -44,7 +44,8 @@ struct ZeroInputCycle {
     int period = 0; ///< in samples; 1 is an output stuck away from 0
 };
 
-/// Simulated from a state that a full-scale white input left.
+/// Simulated from the states that full-scale white noise and a full-scale step left; the larger of
+/// the two. Other states may hold other cycles.
 ZeroInputCycle zero_input_cycle(const DifferenceEquation& equation);
 
 /// The smallest constant error that still moves the last integrator, by simulation; in floating

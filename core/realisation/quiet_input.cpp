@@ -7,6 +7,7 @@
 #include <algorithm>
 #include <cmath>
 #include <limits>
+#include <utility>
 
 namespace cornerwright {
 namespace {
@@ -55,16 +56,9 @@ bool still_integrates(const DifferenceEquation& equation, double error, double o
     return after != before;
 }
 
-} // namespace
-
-ZeroInputCycle zero_input_cycle(const DifferenceEquation& equation) {
-    constexpr int excited = 1000;
+/// What remains of the run on zero input from the state in which it stands.
+ZeroInputCycle cycle_of(const DifferenceEquation& equation, BitTrueRun run) {
     constexpr int longest = 200000;
-    BitTrueRun run(equation);
-    WhiteInput input(1.0);
-    for (int n = 0; n < excited; ++n)
-        run.step(input.next());
-
     ZeroInputCycle cycle;
     const int period = period_on_zero_input(run, longest);
     if (period == 0) {
@@ -88,6 +82,28 @@ ZeroInputCycle zero_input_cycle(const DifferenceEquation& equation) {
     cycle.amplitude = Figure::of(amplitude);
     cycle.period = amplitude > 0.0 ? period : 0;
     return cycle;
+}
+
+/// The larger; a cycle that was not ruled out stands above none.
+double weight_of(const ZeroInputCycle& cycle) {
+    return cycle.amplitude.is_value() ? cycle.amplitude.value()
+                                      : std::numeric_limits<double>::min();
+}
+
+} // namespace
+
+ZeroInputCycle zero_input_cycle(const DifferenceEquation& equation) {
+    constexpr int excited = 1000;
+    BitTrueRun noisy(equation);
+    BitTrueRun pushed(equation);
+    WhiteInput input(1.0);
+    for (int n = 0; n < excited; ++n) {
+        noisy.step(input.next());
+        pushed.step(1.0);
+    }
+    const ZeroInputCycle after_noise = cycle_of(equation, std::move(noisy));
+    const ZeroInputCycle after_step = cycle_of(equation, std::move(pushed));
+    return weight_of(after_step) > weight_of(after_noise) ? after_step : after_noise;
 }
 
 Figure smallest_integrated_error(const DifferenceEquation& equation) {

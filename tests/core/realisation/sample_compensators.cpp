@@ -1,73 +1,8 @@
 #include "tests/core/realisation/sample_compensators.h"
 
+#include "tests/core/realisation/section_builders.h"
+
 namespace cornerwright::test {
-namespace {
-
-using enum SectionKind;
-
-/// A section of `kind` with the numbers of `change` set.
-template <class Change>
-Section section_of(SectionKind kind, Change change) {
-    Section section;
-    section.kind = kind;
-    change(section);
-    return section;
-}
-
-Section gain_of(double value) {
-    return section_of(gain, [=](Section& s) { s.gain = value; });
-}
-Section with_corner(SectionKind kind, double w) {
-    return section_of(kind, [=](Section& s) { s.corner_rad_s = w; });
-}
-Section pi_at(double w) {
-    return with_corner(pi, w);
-}
-Section washout_at(double w) {
-    return with_corner(washout, w);
-}
-Section plain_integrator() {
-    return with_corner(integrator, 1.0);
-}
-Section zero_and_pole(SectionKind kind, double zero, double pole) {
-    return section_of(kind, [=](Section& s) {
-        s.zero_rad_s = zero;
-        s.pole_rad_s = pole;
-    });
-}
-Section lead_of(double zero, double pole) {
-    return zero_and_pole(lead, zero, pole);
-}
-Section lag_of(double zero, double pole) {
-    return zero_and_pole(lag, zero, pole);
-}
-Section pole_at(double w) {
-    return zero_and_pole(real_pole, 1.0, w);
-}
-Section zero_at(double w) {
-    return zero_and_pole(real_zero, w, 1.0);
-}
-Section damped(SectionKind kind, double w, double damping) {
-    return section_of(kind, [=](Section& s) {
-        s.corner_rad_s = w;
-        s.damping = damping;
-    });
-}
-Section poles_at(double w, double damping) {
-    return damped(complex_poles, w, damping);
-}
-Section zeros_at(double w, double damping) {
-    return damped(complex_zeros, w, damping);
-}
-Section notch_at(double w, double zero_damping, double pole_damping) {
-    return section_of(notch, [=](Section& s) {
-        s.corner_rad_s = w;
-        s.zero_damping = zero_damping;
-        s.pole_damping = pole_damping;
-    });
-}
-
-} // namespace
 
 std::vector<SampleCompensator> sample_compensators() {
     const OutputLimits narrow{-0.4, 0.7};
