@@ -77,6 +77,20 @@ double merit_of(const Evaluation& evaluation) {
     return std::max(smallest, unstable_merit);
 }
 
+/// Verdict, merit and what is not determined, from the loops.
+void judge_all(const PlacementProblem& problem, Evaluation& evaluation) {
+    std::vector<JudgedLoop> judged;
+    for (const PlacementLoop& loop : evaluation.loops)
+        judged.push_back({problem.plants[loop.plant].name, loop.name, &loop.assessment.figures});
+    evaluation.verdict = judge(problem.requirements, evaluation.request, judged);
+    evaluation.merit = merit_of(evaluation);
+    for (const RequirementResult& result : evaluation.verdict.requirements)
+        evaluation.undetermined += static_cast<std::size_t>(
+            std::count_if(result.all.begin(), result.all.end(), [](const Judgement& judgement) {
+                return !judgement.share.is_determined();
+            }));
+}
+
 } // namespace
 
 DesignLoop design_loop_with(const PlacementProblem& problem, std::size_t plant,
@@ -112,16 +126,21 @@ Evaluation evaluate(const PlacementProblem& problem, const Chain& chain) {
                 {i, LoopName::realised, std::move(*realised), std::move(assessed)});
         }
     }
-    std::vector<JudgedLoop> judged;
-    for (const PlacementLoop& loop : evaluation.loops)
-        judged.push_back({problem.plants[loop.plant].name, loop.name, &loop.assessment.figures});
-    evaluation.verdict = judge(problem.requirements, evaluation.request, judged);
-    evaluation.merit = merit_of(evaluation);
-    for (const RequirementResult& result : evaluation.verdict.requirements)
-        evaluation.undetermined += static_cast<std::size_t>(
-            std::count_if(result.all.begin(), result.all.end(), [](const Judgement& judgement) {
-                return !judgement.share.is_determined();
-            }));
+    judge_all(problem, evaluation);
+    return evaluation;
+}
+
+Evaluation evaluate_realised(const PlacementProblem& problem, const DifferenceEquation& equation) {
+    Evaluation evaluation;
+    evaluation.request = request_of(problem.requirements);
+    const double delay = problem.sampling ? problem.sampling->computation_delay_s : 0.0;
+    for (std::size_t i = 0; i < problem.plants.size(); ++i) {
+        RealisedLoop loop{equation, problem.plants[i].plant, delay};
+        LoopAssessment assessed =
+            assess_as_required(loop, evaluation.request, problem.requirements);
+        evaluation.loops.push_back({i, LoopName::realised, std::move(loop), std::move(assessed)});
+    }
+    judge_all(problem, evaluation);
     return evaluation;
 }
 

@@ -65,4 +65,7 @@ std::optional<RealisedLoop> realised_loop_with(const PlacementProblem& problem, 
 /// Judges `chain` in place of the problem's compensator. Throws InputError as above.
 Evaluation evaluate(const PlacementProblem& problem, const Chain& chain);
 
+/// Judges a difference equation in place of the problem's compensator, on the realised loops alone.
+Evaluation evaluate_realised(const PlacementProblem& problem, const DifferenceEquation& equation);
+
 } // namespace cornerwright
