@@ -77,6 +77,13 @@ std::string range_text(double lowest, double highest) {
     return "a frequency from " + number_text(lowest) + " to " + number_text(highest) + " rad/s";
 }
 
+/// What is known of the roots of a measured loop: the compensator's and the declared integrators.
+RootForm known_roots(RootForm compensator, const MeasuredPlant& plant) {
+    compensator.poles.insert(compensator.poles.end(), static_cast<std::size_t>(plant.integrators),
+                             Complex(0.0));
+    return compensator;
+}
+
 } // namespace
 
 FrequencyAssessment assess_frequency(const DesignLoop& loop, const FigureRequest& request,
@@ -85,7 +92,9 @@ FrequencyAssessment assess_frequency(const DesignLoop& loop, const FigureRequest
     const auto* measured = std::get_if<MeasuredPlant>(&loop.plant);
     Stability stability;
     if (measured) {
-        stability = stability_from_curve(*curve);
+        stability = with_hidden_factor(
+            stability_from_curve(*curve),
+            hidden_factor(known_roots(loop.compensator, *measured), RootPlane::s));
     } else {
         const RootForm roots = loop.compensator * std::get<PlantModel>(loop.plant).roots;
         const bool rational = !curve->turns_without_end;
@@ -109,11 +118,16 @@ FrequencyAssessment assess_frequency(const RealisedLoop& loop, const FigureReque
     Stability stability = measured || closed_loop_poles_z.empty()
                               ? stability_from_curve(*curve)
                               : stability_from_poles(closed_loop_poles_z, true);
-    if (!measured) {
+    const RootForm compensator = roots_in_z_minus_1(loop.compensator);
+    if (measured) {
+        stability = with_hidden_factor(
+            std::move(stability),
+            hidden_factor(known_roots(compensator, *measured), RootPlane::z_minus_1));
+    } else {
         const double period = loop.compensator.sample_period_s;
         const SampledPlant sampled =
             sample_plant(std::get<PlantModel>(loop.plant), loop.computation_delay_s, period);
-        const RootForm roots = roots_in_z_minus_1(loop.compensator) * sampled.delta_form;
+        const RootForm roots = compensator * sampled.delta_form;
         stability =
             with_hidden_factor(std::move(stability), hidden_factor(roots, RootPlane::z_minus_1));
     }

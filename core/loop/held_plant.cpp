@@ -39,23 +39,32 @@ std::vector<double> points_of_period(const ComplexVector& poles, double period,
     return points;
 }
 
+/// Re(row . state).
+double real_product(const ComplexVector& row, const ComplexVector& state) {
+    double sum = 0.0;
+    for (std::size_t i = 0; i < row.size(); ++i)
+        sum += row[i].real() * state[i].real() - row[i].imag() * state[i].imag();
+    return sum;
+}
+
 } // namespace
 
-ComplexVector BlockChain::rate(const ComplexVector& state, double v) const {
-    ComplexVector result(order);
-    for (std::size_t i = 0; i < order; ++i) {
-        result[i] = input[i] * v;
+void BlockChain::add_rate(ComplexVector& state, double v) const {
+    // Lower triangular: from the last state up, none is needed once it is overwritten.
+    for (std::size_t i = order; i-- > 0;) {
+        Complex change = input[i] * v;
         for (std::size_t k = 0; k <= i; ++k)
-            result[i] += times(matrix[i * order + k], state[k]);
+            change += times(matrix[i * order + k], state[k]);
+        state[i] += change;
     }
-    return result;
 }
 
 double BlockChain::out(const ComplexVector& state, double v) const {
-    double sum = direct * v;
-    for (std::size_t i = 0; i < order; ++i)
-        sum += output[i].real() * state[i].real() - output[i].imag() * state[i].imag();
-    return sum;
+    return real_product(output, state) + direct * v;
+}
+
+double BlockChain::slope(const ComplexVector& state, double v) const {
+    return real_product(slope_output, state) + slope_direct * v;
 }
 
 BlockChain block_chain(const RootForm& form) {
@@ -98,6 +107,12 @@ BlockChain block_chain(const RootForm& form) {
     for (Complex& entry : chain.output)
         entry *= gain;
     chain.direct = gain * direct.real();
+    chain.slope_output.resize(order);
+    for (std::size_t i = 0; i < order; ++i) {
+        for (std::size_t k = 0; k <= i; ++k)
+            chain.slope_output[k] += times(chain.output[i], chain.matrix[i * order + k]);
+        chain.slope_direct += times(chain.output[i], chain.input[i]).real();
+    }
     return chain;
 }
 

@@ -14,10 +14,15 @@ struct BlockChain {
     ComplexVector input;
     ComplexVector output;
     double direct = 0.0;
+    ComplexVector slope_output; ///< C A
+    double slope_direct = 0.0;  ///< C B
 
-    /// A x + B v.
-    ComplexVector rate(const ComplexVector& state, double v) const;
+    /// x + A x + B v in place of x.
+    void add_rate(ComplexVector& state, double v) const;
+    /// y = C x + D v.
     double out(const ComplexVector& state, double v) const;
+    /// y' for a held v.
+    double slope(const ComplexVector& state, double v) const;
 };
 
 /// `form` is proper.

@@ -11,12 +11,13 @@
 namespace cornerwright {
 namespace {
 
-constexpr double agreement = 5e-5; // of the size, between simulation and tail
-constexpr double slow_turn = 0.3;  // rad or time constants in a sample: the tail is smooth then
+constexpr double agreement = 5e-5;        // of the size, between simulation and tail
+constexpr double spent = 0.1 * agreement; // of a signal's size: a mode that no longer counts
+constexpr double slow_turn = 0.3; // rad or time constants in a sample: the tail is smooth then
 // In z - 1: what the rounding of coefficients and of z leaves of a cancelled root.
 constexpr double same_place = 1e-13;
 constexpr std::size_t first_check = 48; // samples
-constexpr std::size_t most_pieces = 4000000;
+constexpr double most_pieces = 4e6;
 
 /// A delay counted from the start of a sample.
 struct Offset {
@@ -99,15 +100,12 @@ class Run {
         now = compensator_.out(compensator_state_, reference_ - y_before) /
               (1.0 + compensator_.direct * through);
         const double error = reference_ - y_before - through * now;
-        const ComplexVector change = compensator_.rate(compensator_state_, error);
-        for (std::size_t i = 0; i < change.size(); ++i)
-            compensator_state_[i] += change[i];
+        compensator_.add_rate(compensator_state_, error);
     }
 
     void append(double t, double input, JoinedPoints& y) const {
         const BlockChain& chain = plant_.chain();
-        const double slope = chain.out(chain.rate(plant_state_, input), 0.0);
-        y.append(t, chain.out(plant_state_, input), slope);
+        y.append(t, chain.out(plant_state_, input), chain.slope(plant_state_, input));
     }
 
     const HeldPlant& plant_;
@@ -144,6 +142,9 @@ class TailModes {
     /// The modes that still count after so many samples of these signals; nothing where one of them
     /// turns too fast for a smooth curve through the sampling instants.
     std::optional<Tail> after(std::size_t samples, const StepSignals& signals) const;
+
+    /// After how many samples the last mode that turns too fast for that will have died.
+    double samples_of_fast_modes(const StepSignals& signals) const;
 
   private:
     struct Entry {
@@ -193,8 +194,24 @@ TailModes::TailModes(const SampledLoop& loop, const ComplexVector& poles_z,
     }
 }
 
+double TailModes::samples_of_fast_modes(const StepSignals& signals) const {
+    const double y_size = size_of(signals.y);
+    const double u_size = size_of(signals.u);
+    const double disturbance_size = size_of(signals.y_disturbance);
+    double samples = 0.0;
+    for (const Entry& entry : entries_) {
+        if (std::abs(entry.turn) <= slow_turn)
+            continue;
+        const double part = std::max({std::abs(entry.y) / y_size, std::abs(entry.u) / u_size,
+                                      std::abs(entry.y_disturbance) / disturbance_size});
+        // Weights of poles at one place are no numbers, and tell nothing here.
+        if (part > spent && std::isfinite(part))
+            samples = std::max(samples, std::log(spent / part) / entry.turn.real());
+    }
+    return samples;
+}
+
 std::optional<Tail> TailModes::after(std::size_t samples, const StepSignals& signals) const {
-    constexpr double spent = 0.1 * agreement; // of a signal's size
     Tail tail;
     tail.y.modes.push_back({0.0, {steady_.y}});
     tail.u.modes.push_back({0.0, {steady_.u}});
@@ -245,6 +262,11 @@ ModalSum constant(double value) {
 
 std::optional<StepSignals> sampled_step(const SampledLoop& loop, const ComplexVector& poles_z,
                                         double until_s) {
+    // The fit of a measurement may disagree with its points about the stability of the loop.
+    const bool grows =
+        std::any_of(poles_z.begin(), poles_z.end(), [](Complex z) { return std::abs(z) >= 1.0; });
+    if (grows && until_s == 0.0)
+        return std::nullopt;
     const double period = loop.sample_period_s;
     const double dead_time_s = loop.plant.dead_time_s;
     const Offset control = offset_of(dead_time_s + loop.computation_delay_s, period);
@@ -279,7 +301,10 @@ std::optional<StepSignals> sampled_step(const SampledLoop& loop, const ComplexVe
         if (!settled && steady.finite)
             slow = modes.after(3 * samples / 4, signals);
         const bool told = settled || (slow && agree(*slow));
-        const bool worn_out = samples * plant.pieces().size() > most_pieces;
+        // Known after the first stretch, rather than found out after the last.
+        const double needed = std::max(static_cast<double>(samples),
+                                       until_s == 0.0 ? modes.samples_of_fast_modes(signals) : 0.0);
+        const bool worn_out = needed * static_cast<double>(plant.pieces().size()) > most_pieces;
         if (!told && !worn_out && (until_s == 0.0 || end < until_s))
             continue;
         if (!told && (until_s == 0.0 || end < until_s))

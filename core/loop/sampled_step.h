@@ -17,7 +17,7 @@ struct SampledLoop {
 /// exactly between them, the disturbance stepping at a sampling instant. Once no mode is left that
 /// turns within a few samples, the slow closed-loop poles (in z) carry the signals on, checked
 /// against the simulation where they meet. `until_s` 0: until settled; else at least so far.
-/// Returns nothing where that takes more than the work allowed.
+/// Returns nothing where that takes more than the work allowed or never comes to be.
 std::optional<StepSignals> sampled_step(const SampledLoop& loop,
                                         const ComplexVector& closed_loop_poles_z,
                                         double until_s = 0.0);

@@ -1,6 +1,7 @@
 #include "core/loop/step_signal.h"
 
 #include <algorithm>
+#include <array>
 #include <cmath>
 
 namespace cornerwright {
@@ -10,6 +11,29 @@ namespace {
 struct Cubic {
     double c0, c1, c2, c3;
     double at(double x) const { return c0 + x * (c1 + x * (c2 + x * c3)); }
+
+    /// Bounds on [0, 1]: those of the four Bernstein coefficients, whose hull holds the cubic.
+    double low() const { return std::min(std::min(c0, b1()), std::min(b2(), b3())); }
+    double high() const { return std::max(std::max(c0, b1()), std::max(b2(), b3())); }
+
+  private:
+    double b1() const { return c0 + c1 / 3.0; }
+    double b2() const { return c0 + (2.0 * c1 + c2) / 3.0; }
+    double b3() const { return c0 + c1 + c2 + c3; }
+};
+
+/// At most so many places on a cubic: its ends and where it turns between them.
+class Places {
+  public:
+    void add(double x) { at_[size_++] = x; }
+    std::size_t size() const { return size_; }
+    double operator[](std::size_t i) const { return at_[i]; }
+    const double* begin() const { return at_.data(); }
+    const double* end() const { return at_.data() + size_; }
+
+  private:
+    std::array<double, 4> at_{};
+    std::size_t size_ = 0;
 };
 
 Cubic between(const JoinedPoints& points, std::size_t i) {
@@ -20,18 +44,20 @@ Cubic between(const JoinedPoints& points, std::size_t i) {
     return {points.value[i], first, 3.0 * rise - 2.0 * first - second, first + second - 2.0 * rise};
 }
 
-/// Where the cubic turns inside (0, 1).
-std::vector<double> turning_points(const Cubic& cubic) {
+/// Where the cubic turns inside (0, 1), ascending.
+Places turning_points(const Cubic& cubic) {
     // c1 + 2 c2 x + 3 c3 x^2 = 0, by the form that does not cancel.
     const double half = cubic.c2;
     const double discriminant = half * half - 3.0 * cubic.c3 * cubic.c1;
-    std::vector<double> inside;
+    Places inside;
     if (discriminant < 0.0)
         return inside;
     const double q = -(half + std::copysign(std::sqrt(discriminant), half));
-    for (const double x : {q / (3.0 * cubic.c3), cubic.c1 / q})
+    const double one = q / (3.0 * cubic.c3);
+    const double other = cubic.c1 / q;
+    for (const double x : {std::min(one, other), std::max(one, other)})
         if (x > 0.0 && x < 1.0)
-            inside.push_back(x);
+            inside.add(x);
     return inside;
 }
 
@@ -46,13 +72,13 @@ double crossing(const Cubic& cubic, double level, double low, double high) {
     return 0.5 * (low + high);
 }
 
-/// Ends of the pieces of a cubic that go one way.
-std::vector<double> monotone_ends(const Cubic& cubic) {
-    std::vector<double> ends{0.0};
+/// Ends of the pieces of a cubic that go one way, ascending.
+Places monotone_ends(const Cubic& cubic) {
+    Places ends;
+    ends.add(0.0);
     for (const double x : turning_points(cubic))
-        ends.push_back(x);
-    ends.push_back(1.0);
-    std::sort(ends.begin(), ends.end());
+        ends.add(x);
+    ends.add(1.0);
     return ends;
 }
 
@@ -128,7 +154,9 @@ std::optional<double> StepSignal::first_reaching(double level, double sign) cons
         if (i + 1 == points.t_s.size() || points.t_s[i + 1] == points.t_s[i])
             continue;
         const Cubic cubic = between(points, i);
-        const std::vector<double> ends = monotone_ends(cubic);
+        if (std::max(sign * cubic.low(), sign * cubic.high()) < level)
+            continue;
+        const Places ends = monotone_ends(cubic);
         for (std::size_t k = 0; k + 1 < ends.size(); ++k)
             if (sign * cubic.at(ends[k + 1]) >= level)
                 return time_at(points, i, crossing(cubic, sign * level, ends[k], ends[k + 1]));
@@ -146,7 +174,9 @@ double StepSignal::last_outside(double band) const {
     for (std::size_t i = points.t_s.size(); i-- > 0;) {
         if (i + 1 < points.t_s.size() && points.t_s[i + 1] > points.t_s[i]) {
             const Cubic cubic = between(points, i);
-            const std::vector<double> ends = monotone_ends(cubic);
+            if (middle - cubic.low() <= band && cubic.high() - middle <= band)
+                continue;
+            const Places ends = monotone_ends(cubic);
             for (std::size_t k = ends.size() - 1; k-- > 0;) {
                 const double offset = cubic.at(ends[k]) - middle;
                 if (std::abs(offset) <= band)

@@ -4,6 +4,7 @@
 #include <gtest/gtest.h>
 
 #include <cmath>
+#include <memory>
 #include <numbers>
 
 namespace cornerwright {
@@ -130,6 +131,23 @@ TEST(FrequencyErrors, TypesZeroToThreeAndCancelledIntegrators) {
     EXPECT_DOUBLE_EQ(cancelled.ramp.value(), 5.0 / 20.0);
     const SteadyStateErrors washout = errors({{0.0}, {-1.0, -5.0}, 20.0});
     EXPECT_EQ(washout.step.value(), 1.0);
+}
+
+TEST(FrequencyStability, ADeclaredIntegratorThatTheCompensatorTakesAwayIsNamed) {
+    const RootForm axis{{}, {0.0, -9.0}, 90.0};
+    auto response = std::make_shared<MeasuredResponse>();
+    for (double w = 0.1; w < 1000.0; w *= 1.1) {
+        response->w_rad_s.push_back(w);
+        response->response.push_back(evaluate(axis, Complex(0.0, w)));
+    }
+    DesignLoop loop;
+    loop.plant = MeasuredPlant{response, 1, 0, {}};
+    EXPECT_EQ(assess(loop).stability.stable, true);
+    loop.compensator = {{0.0}, {-50.0}, 50.0};
+    const FrequencyAssessment hidden = assess(loop);
+    EXPECT_EQ(hidden.stability.stable, false);
+    EXPECT_NE(hidden.stability.reason.find("the factor s is cancelled"), std::string::npos)
+        << hidden.stability.reason;
 }
 
 } // namespace
