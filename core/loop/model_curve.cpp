@@ -18,6 +18,9 @@ constexpr double pi = std::numbers::pi;
 /// distance from 1 on its last asymptote, so that no crossing lies outside.
 constexpr double margin_beyond_corners = 100.0;
 constexpr double far_from_unity = 1e3;
+/// A loop that is flat at an end may pass 1 far beyond its corners where the constant is nearly 1:
+/// the search goes on this far, a decade at a time, to a distance of 1e-12 of 1.
+constexpr double flat_search_decades = 4.0;
 constexpr double listed_level = 0.01;  // -40 dB, the contract's end of the list of crossings
 constexpr double points_a_turn = 10.0; // of dead-time phase, where |L| matters
 constexpr double most_turns = 1000.0;
@@ -53,6 +56,8 @@ class ModelCurve : public LoopCurve {
 
     Functions f_;
     double search_end_ = HUGE_VAL;
+    double drawn_from_ = 0.0;
+    double drawn_to_ = HUGE_VAL;
     std::vector<double> breaks_;
 };
 
@@ -115,6 +120,16 @@ ModelCurve::ModelCurve(Functions functions, const ComplexVector& closed_loop_roo
         high = std::max(high, far_place(high_end, 1));
 
     std::vector<double> grid = guided_grid(low, high, guides);
+    if (low_end.order == 0)
+        drawn_from_ = low;
+    if (high_end.order == 0 && !realised && !turns_without_end)
+        drawn_to_ = high;
+    for (double decade = 1.0; decade <= flat_search_decades; ++decade) {
+        if (drawn_from_ > 0.0)
+            grid.push_back(low * std::pow(10.0, -decade));
+        if (drawn_to_ < HUGE_VAL)
+            grid.push_back(high * std::pow(10.0, decade));
+    }
     if (turns_without_end)
         bound_turns(guides, low, high);
     add_breaks(grid, low, high);
@@ -236,6 +251,7 @@ void ModelCurve::evaluate(const std::vector<double>& grid) {
     for (std::size_t i = 0; i < grid.size(); ++i) {
         f_.lag.apply(grid[i], plant[i]);
         points.push_back(point_of_loop(grid[i], compensator[i], plant[i]));
+        points.back().drawn = grid[i] >= drawn_from_ && grid[i] <= drawn_to_;
     }
     for (const double w : breaks_) {
         const auto before = std::lower_bound(

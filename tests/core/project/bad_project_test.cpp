@@ -83,7 +83,7 @@ constexpr Bad key_errors[]{
     {"KeyOfAnotherKind",
      "{\"cornerwright\": 1, \"compensator\": [{\"kind\": \"gain\", \"gain\": 1, "
      "\"corner_rad_s\": 2}]}",
-     1, 66, "\"gain\"", "\"corner_rad_s\""},
+     1, 65, "\"gain\"", "\"corner_rad_s\""},
 };
 INSTANTIATE_TEST_SUITE_P(Keys, BadProject, testing::ValuesIn(key_errors),
                          [](const auto& chosen) { return std::string(chosen.param.name); });
