@@ -21,6 +21,8 @@ int run(int argc, char** argv) {
     add_read(program, status);
     add_place(program, status);
     add_fleet(program, status);
+    add_handover(program, status);
+    add_report(program, status);
     try {
         program.parse(argc, argv);
     } catch (const CLI::ParseError& error) {

@@ -54,12 +54,16 @@ std::string_view name_of(HandoverForm form) {
     return "csv";
 }
 
-std::vector<HandoverFile> handover_files(const HandoverInput& input, HandoverForm form) {
-    if (!names_a_function(input.name) || is_reserved(input.name))
+void check_handover_name(const std::string& name) {
+    if (!names_a_function(name) || is_reserved(name))
         throw InputError({},
                          "a name of letters, digits and single underscores that starts with a "
                          "letter, ends without an underscore and is no reserved word",
-                         "\"" + input.name + "\"");
+                         "\"" + name + "\"");
+}
+
+std::vector<HandoverFile> handover_files(const HandoverInput& input, HandoverForm form) {
+    check_handover_name(input.name);
     if (!input.assessment->equation)
         throw InputError({}, "a project with a difference equation to hand over",
                          input.assessment->realisation_problem.empty()

@@ -29,6 +29,10 @@ struct HandoverInput {
     std::string name = "compensator";       ///< of the functions and files
 };
 
+/// Throws InputError where `name` cannot name the functions of every form: an identifier of C and
+/// of IEC 61131-3 alike, no reserved word.
+void check_handover_name(const std::string& name);
+
 /// The difference equation as firmware receives it, with its evidence and test vectors. The same
 /// input gives the same bytes.
 ///
