@@ -19,7 +19,12 @@ int run(int argc, char** argv) {
     add_step(program, status);
     add_locus(program, status);
     add_read(program, status);
+    add_estimate(program, status);
+    add_fit(program, status);
+    add_design(program, status);
     add_place(program, status);
+    add_sensitivity(program, status);
+    add_tolerance(program, status);
     add_fleet(program, status);
     add_handover(program, status);
     add_report(program, status);

@@ -1,15 +1,13 @@
 #include "app/cli/command.h"
+#include "app/cli/written_project.h"
 #include "core/engine/placement_problem.h"
 #include "core/placement/placement.h"
 
-#include <filesystem>
 #include <iostream>
 #include <memory>
 
 namespace cornerwright::cli {
 namespace {
-
-namespace fs = std::filesystem;
 
 struct Options {
     std::string project;
@@ -17,20 +15,6 @@ struct Options {
     std::uint64_t seed = 1;
     double time_limit_s = 0.0;
 };
-
-/// Measurements are named relative to the project file; a project written to another folder names
-/// the same files from there.
-void name_measurements_from(Project& project, const fs::path& from, const fs::path& to) {
-    const fs::path source = fs::weakly_canonical(fs::absolute(from)).parent_path();
-    const fs::path target = fs::weakly_canonical(fs::absolute(to)).parent_path();
-    if (source == target)
-        return;
-    for (PlantCase& plant_case : project.plant_cases) {
-        if (auto* measurement = std::get_if<MeasurementSource>(&plant_case.source))
-            measurement->file =
-                (source / measurement->file).lexically_relative(target).generic_string();
-    }
-}
 
 } // namespace
 
@@ -55,8 +39,7 @@ void add_place(CLI::App& program, int&) {
         placement.time_limit_s = options->time_limit_s;
         const PlacementResult result = place(placement_problem_of(project), placement);
         project.compensator = result.compensator;
-        name_measurements_from(project, options->project, options->out);
-        save_project(project, options->out);
+        write_project(project, options->project, options->out);
         for (const std::string& words : result.words)
             std::cout << words << '\n';
     });
