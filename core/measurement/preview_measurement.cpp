@@ -75,6 +75,7 @@ Preview preview_source(ByteSource& source, const std::string& file_name, const R
         preview.result.emplace().cancelled = true;
     }
     preview.choices = std::move(report.choices);
+    preview.time_record = report.time_record;
     take_lines(source, file_name, report, line_limit, preview);
     return preview;
 }

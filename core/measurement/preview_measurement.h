@@ -26,6 +26,7 @@ struct OpenChoice {
 /// What an import panel shows before, and while, the user settles what the file leaves open.
 struct Preview {
     enum class Kind { text_table, touchstone, universal_file } kind = Kind::text_table;
+    bool time_record = false;   ///< a table of samples over time, which `estimate_response` takes
     std::vector<RawLine> lines;        ///< the first lines of the file
     std::vector<ColumnInfo> columns;   ///< as far as understood; unit empty where it is open
     std::vector<OpenChoice> choices;   ///< empty when nothing is open

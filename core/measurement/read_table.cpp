@@ -37,7 +37,8 @@ class TableReader {
           options_(options),
           layout_(report.layout),
           columns_(report.columns),
-          choices_(report.choices) {}
+          choices_(report.choices),
+          time_record_(report.time_record) {}
 
     ReadResult read() {
         prepare();
@@ -77,9 +78,12 @@ class TableReader {
             std::any_of(record.headings.begin(), record.headings.end(),
                         [](const Heading& heading) { return heading.meaning == Meaning::time; });
         const bool fits = record.row_fields > 1 && record.headings.size() == record.row_fields;
-        if (fits && (time || sampling_in(record.preamble)))
-            lines_.refuse(record.heading_line, {}, "a frequency response",
-                          "a time record, which `estimate` makes a response of");
+        if (!fits || !(time || sampling_in(record.preamble)))
+            return;
+        layout_ = record;
+        time_record_ = true;
+        lines_.refuse(record.heading_line, {}, "a frequency response",
+                      "a time record, which `estimate` makes a response of");
     }
 
     void seek_header_only() const {
@@ -246,6 +250,7 @@ class TableReader {
     TableLayout& layout_;
     TableColumns& columns_;
     std::vector<OpenChoice>& choices_;
+    bool& time_record_;
     ValuesSeen seen_;
 };
 

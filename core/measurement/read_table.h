@@ -13,6 +13,7 @@ struct TableReport {
     TableLayout layout;
     TableColumns columns;
     std::vector<OpenChoice> choices;
+    bool time_record = false; ///< `layout` is then that of a record
 };
 
 /// Reads a text table as a frequency response. Throws InputError.

@@ -27,6 +27,13 @@ void require_usable(const MeasuredResponse& measured, const char* found) {
             throw InputError({}, "a measurement that gives a finite plant", found);
 }
 
+/// The coherence that tells a relative error `factor` times as great: the square of the error goes
+/// as (1 - c)/c.
+double coherence_of_error_times(double factor, double coherence) {
+    const double grown = factor * factor * (1.0 - coherence);
+    return coherence == 0.0 ? 0.0 : coherence / (coherence + grown);
+}
+
 } // namespace
 
 MeasuredResponse with_sign_flipped(MeasuredResponse measured) {
@@ -66,9 +73,25 @@ MeasuredResponse plant_from_closed_loop(MeasuredResponse closed_loop,
     for (std::size_t i = 0; i < compensator.size(); ++i) {
         const Complex t = closed_loop.response[i];
         closed_loop.response[i] = t / (compensator[i] * (1.0 - t));
+        if (!closed_loop.coherence.empty() && t != 1.0)
+            closed_loop.coherence[i] =
+                coherence_of_error_times(1.0 / std::abs(1.0 - t), closed_loop.coherence[i]);
     }
     require_usable(closed_loop, "a closed loop of exactly 1 somewhere");
     return closed_loop;
+}
+
+MeasuredResponse plant_from(MeasuredQuantity quantity, MeasuredResponse measured,
+                            std::span<const Complex> compensator) {
+    switch (quantity) {
+    case MeasuredQuantity::loop_gain:
+        return plant_from_loop_gain(std::move(measured), compensator);
+    case MeasuredQuantity::closed_loop:
+        return plant_from_closed_loop(std::move(measured), compensator);
+    case MeasuredQuantity::plant:
+        break;
+    }
+    return measured;
 }
 
 } // namespace cornerwright

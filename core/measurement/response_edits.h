@@ -21,9 +21,17 @@ MeasuredResponse plant_from_loop_gain(MeasuredResponse loop_gain,
                                       std::span<const Complex> compensator);
 
 /// P = T/(C (1 - T)) from a measured complementary sensitivity T. Where |L| is large, 1 - T is a
-/// small difference and the plant inherits its error. Throws InputError as above, and where T is
-/// exactly 1.
+/// small difference and the plant inherits its error: dP/P = dT/T / (1 - T). The coherence becomes
+/// the one that tells this error with the same number of averages. Throws InputError as above, and
+/// where T is exactly 1.
 MeasuredResponse plant_from_closed_loop(MeasuredResponse closed_loop,
                                         std::span<const Complex> compensator);
+
+/// What was measured around a loop.
+enum class MeasuredQuantity { plant, loop_gain, closed_loop };
+
+/// The plant behind any of them; `compensator` counts for all but the plant itself.
+MeasuredResponse plant_from(MeasuredQuantity quantity, MeasuredResponse measured,
+                            std::span<const Complex> compensator);
 
 } // namespace cornerwright

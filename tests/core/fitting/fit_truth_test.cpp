@@ -38,28 +38,6 @@ MeasuredResponse read_points(const std::filesystem::path& file) {
     return measured;
 }
 
-ComplexVector roots_in(const json& list) {
-    ComplexVector roots;
-    for (const json& root : list)
-        roots.emplace_back(root.at(0).get<double>(), root.at(1).get<double>());
-    return roots;
-}
-
-PlantModel plant_in(const json& plant) {
-    return {{roots_in(plant.at("zeros_rad_s")), roots_in(plant.at("poles_rad_s")),
-             plant.at("gain").get<double>()},
-            plant.at("dead_time_s").get<double>()};
-}
-
-/// "auto" or a number, also as text.
-std::optional<double> asked(const json& value) {
-    if (value.is_number())
-        return value.get<double>();
-    if (value == "auto")
-        return {};
-    return std::stod(value.get<std::string>());
-}
-
 class FitTruth : public testing::TestWithParam<std::string> {};
 
 TEST_P(FitTruth, EveryRunReachesWhatItMust) {

@@ -4,6 +4,32 @@
 #include <cmath>
 
 namespace cornerwright {
+namespace {
+
+using nlohmann::json;
+
+ComplexVector roots_in(const json& list) {
+    ComplexVector roots;
+    for (const json& root : list)
+        roots.emplace_back(root.at(0).get<double>(), root.at(1).get<double>());
+    return roots;
+}
+
+} // namespace
+
+PlantModel plant_in(const json& plant) {
+    return {{roots_in(plant.at("zeros_rad_s")), roots_in(plant.at("poles_rad_s")),
+             plant.at("gain").get<double>()},
+            plant.at("dead_time_s").get<double>()};
+}
+
+std::optional<double> asked(const json& value) {
+    if (value.is_number())
+        return value.get<double>();
+    if (value == "auto")
+        return {};
+    return std::stod(value.get<std::string>());
+}
 
 Complex response_of(const PlantModel& model, double w) {
     return evaluate(model.roots, {0.0, w}) * std::polar(1.0, -w * model.dead_time_s);

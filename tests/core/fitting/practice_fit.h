@@ -2,7 +2,17 @@
 
 #include "core/fitting/fit.h"
 
+#include <nlohmann/json.hpp>
+
+#include <optional>
+
 namespace cornerwright {
+
+/// A model as zeros_rad_s, poles_rad_s, gain and dead_time_s.
+PlantModel plant_in(const nlohmann::json& plant);
+
+/// "auto" (nothing) or a number, also as text.
+std::optional<double> asked(const nlohmann::json& value);
 
 /// P(jw) of a model.
 Complex response_of(const PlantModel& model, double w);

@@ -4,6 +4,7 @@
 #include "core/measurement/stepped_sine.h"
 #include "core/measurement/time_record.h"
 #include "core/measurement/write_response.h"
+#include "tests/core/measurement/practice_record.h"
 
 #include <gtest/gtest.h>
 #include <nlohmann/json.hpp>
@@ -25,59 +26,12 @@ namespace {
 const std::filesystem::path data =
     std::filesystem::path(CORNERWRIGHT_TEST_DATA) / "core/measurement/data/records";
 
-std::vector<std::string> records() {
-    return {"belt-sweep.csv", "buck-multisine.txt", "coil-random.csv", "drive-prbs-hum-drift.csv"};
-}
-
-nlohmann::json truth_of(const std::string& record) {
-    std::ifstream stream(data / (record + ".truth.json"));
-    return nlohmann::json::parse(stream);
-}
-
-std::vector<Complex> roots(const nlohmann::json& list) {
-    std::vector<Complex> result;
-    for (const auto& root : list)
-        result.emplace_back(root[0].get<double>(), root[1].get<double>());
-    return result;
-}
-
-/// The response of the truth's model at w; the truth lists it at 120 frequencies of its own, which
-/// tell how the hold and the dead time enter.
-Complex model_response(const nlohmann::json& truth, double w) {
-    const Complex s{0.0, w};
-    Complex value = truth["gain"].get<double>();
-    for (const Complex zero : roots(truth["zeros_rad_s"]))
-        value *= s - zero;
-    for (const Complex pole : roots(truth["poles_rad_s"]))
-        value /= s - pole;
-    return value * std::exp(-s * truth["dead_time_s"].get<double>());
-}
-
-/// Between the frequencies of the truth: log magnitude and phase relative to the model without
-/// hold, a smooth function, go linearly.
-Complex truth_at(const nlohmann::json& file, double w) {
-    const auto& grid = file["truth_w_rad_s"];
-    const auto& values = file["truth_response"];
-    std::size_t i = 1;
-    while (i + 1 < grid.size() && grid[i].get<double>() < w)
-        ++i;
-    const auto ratio = [&](std::size_t k) {
-        const Complex value{values[k][0].get<double>(), values[k][1].get<double>()};
-        return value / model_response(file["truth"], grid[k].get<double>());
-    };
-    const double w0 = grid[i - 1].get<double>();
-    const double w1 = grid[i].get<double>();
-    const double share = (w - w0) / (w1 - w0);
-    const Complex turn = ratio(i) / ratio(i - 1);
-    return model_response(file["truth"], w) * ratio(i - 1) * std::pow(turn, share);
-}
-
 class Record : public testing::TestWithParam<std::string> {};
 
 /// Limits from the truths: 1.6 times the rms and 1.8 times the percentile that the same rule
 /// reaches in an independent implementation, and 0.8 times its bands.
 TEST_P(Record, EstimateMeetsItsTruth) {
-    const auto truth = truth_of(GetParam());
+    const auto truth = truth_of_record(GetParam());
     RecordOptions names;
     names.excitation = truth["excitation"].get<std::string>();
     names.response = truth["response"].get<std::string>();
@@ -89,34 +43,13 @@ TEST_P(Record, EstimateMeetsItsTruth) {
     options.averages = truth["averages"].get<int>();
     const MeasuredResponse estimate = estimate_response(record, options).response;
     const auto& required = truth["required"];
-    const double low = required["band_rad_s"][0].get<double>();
-    const double high = required["band_rad_s"][1].get<double>();
-    const double bands = required["bands"].get<double>();
-    std::vector<double> errors;
-    std::set<int> covered;
-    for (std::size_t i = 0; i < estimate.w_rad_s.size(); ++i) {
-        const double w = estimate.w_rad_s[i];
-        if (w < low || w > high ||
-            estimate.coherence[i] <= required["coherence_above"].get<double>())
-            continue;
-        const Complex expected = truth_at(truth, w);
-        errors.push_back(std::abs(estimate.response[i] - expected) / std::abs(expected));
-        covered.insert(static_cast<int>(bands * std::log(w / low) / std::log(high / low)));
-    }
-    ASSERT_FALSE(errors.empty());
-    std::sort(errors.begin(), errors.end());
-    double squares = 0.0;
-    for (const double error : errors)
-        squares += error * error;
-    const double rms = std::sqrt(squares / static_cast<double>(errors.size()));
-    const double percentile =
-        errors[static_cast<std::size_t>(0.95 * static_cast<double>(errors.size() - 1) + 0.5)];
-    EXPECT_LE(rms, required["rms_relative_error_at_most"].get<double>());
-    EXPECT_LE(percentile, required["p95_relative_error_at_most"].get<double>());
-    EXPECT_GE(covered.size(), required["covered_bands_at_least"].get<std::size_t>());
-    RecordProperty("rms", std::to_string(rms));
-    RecordProperty("p95", std::to_string(percentile));
-    RecordProperty("bands", std::to_string(covered.size()));
+    const EstimateError error = estimate_error(truth, estimate);
+    EXPECT_LE(error.rms, required["rms_relative_error_at_most"].get<double>());
+    EXPECT_LE(error.percentile_95, required["p95_relative_error_at_most"].get<double>());
+    EXPECT_GE(error.covered_bands, required["covered_bands_at_least"].get<std::size_t>());
+    RecordProperty("rms", std::to_string(error.rms));
+    RecordProperty("p95", std::to_string(error.percentile_95));
+    RecordProperty("bands", std::to_string(error.covered_bands));
 }
 
 std::string name_of_record(const testing::TestParamInfo<std::string>& info) {
@@ -127,7 +60,7 @@ std::string name_of_record(const testing::TestParamInfo<std::string>& info) {
     return name;
 }
 
-INSTANTIATE_TEST_SUITE_P(Files, Record, testing::ValuesIn(records()), name_of_record);
+INSTANTIATE_TEST_SUITE_P(Files, Record, testing::ValuesIn(practice_records()), name_of_record);
 
 /// A record of white noise through y[n] = 0.5 y[n-1] + u[n], with noise of a known share on the
 /// response.
