@@ -44,4 +44,11 @@ void ViewState::setSelectedSection(std::optional<std::size_t> index) {
     Q_EMIT selectedSectionChanged();
 }
 
+void ViewState::setFollowed(std::optional<FollowedRequirement> followed) {
+    if (followed_ == followed)
+        return;
+    followed_ = followed;
+    Q_EMIT followedChanged();
+}
+
 } // namespace cornerwright

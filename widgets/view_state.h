@@ -1,5 +1,8 @@
 #pragma once
 
+#include "core/requirements/verdict.h"
+
+
 #include <QObject>
 
 #include <cstddef>
@@ -8,6 +11,15 @@
 #include <utility>
 
 namespace cornerwright {
+
+/// A requirement followed to where it is measured: on which loop of which case.
+struct FollowedRequirement {
+    std::size_t requirement = 0; ///< index into the verdict's requirements
+    std::size_t case_index = 0;
+    LoopName loop = LoopName::design;
+
+    bool operator==(const FollowedRequirement&) const = default;
+};
 
 /// What the views share and no project file holds: the linked cursor, the frequency window, the
 /// unit of frequency, which cases are shown and what is selected. Setters compare and emit only on
@@ -42,6 +54,11 @@ class ViewState : public QObject {
     std::optional<std::size_t> selectedSection() const { return selectedSection_; }
     void setSelectedSection(std::optional<std::size_t> index);
 
+    /// The place that the ledger last led to; the panes mark it as long as its case is shown.
+    const std::optional<FollowedRequirement>& followed() const { return followed_; }
+    void setFollowed(std::optional<FollowedRequirement> followed);
+
+
   signals:
     void unitChanged();
     void cursorChanged();
@@ -49,6 +66,7 @@ class ViewState : public QObject {
     void shownCaseChanged();
     void hiddenCasesChanged();
     void selectedSectionChanged();
+    void followedChanged();
 
   private:
     bool showsHertz_ = true;
@@ -57,6 +75,7 @@ class ViewState : public QObject {
     std::size_t shownCase_ = 0;
     std::set<std::size_t> hiddenCases_;
     std::optional<std::size_t> selectedSection_;
+    std::optional<FollowedRequirement> followed_;
 };
 
 } // namespace cornerwright

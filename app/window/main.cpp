@@ -1,4 +1,5 @@
 #include "app/window/demo_place.h"
+#include "app/window/frame_times.h"
 #include "app/window/picture.h"
 #include "app/window/test_report.h"
 #include "widgets/window/appearance.h"
@@ -119,6 +120,10 @@ int main(int argc, char** argv) {
     }
     if (parser.isSet(options.testReport)) {
         new TestReport(window, parser.value(options.testReport)); // owned by the window
+    }
+    const QString frameTimes = qEnvironmentVariable("CORNERWRIGHT_FRAME_TIMES");
+    if (!frameTimes.isEmpty()) {
+        new FrameTimes(window, frameTimes); // owned by the window
     }
     window.files().offerRecovery();
     window.show();

@@ -41,6 +41,15 @@ PlantModel unscaled(const FactoredModel& model, double scale) {
     return plant;
 }
 
+/// model/measured - 1 at one point.
+Complex relative_error(const PlantModel& model, const MeasuredResponse& measured,
+                       std::size_t point) {
+    const double w = measured.w_rad_s[point];
+    const Complex response =
+        evaluate(model.roots, {0.0, w}) * std::polar(1.0, -w * model.dead_time_s);
+    return response / measured.response[point] - 1.0;
+}
+
 } // namespace
 
 std::vector<double> fit_weights(const MeasuredResponse& measured) {
@@ -64,13 +73,16 @@ std::vector<double> fit_weights(const MeasuredResponse& measured) {
 double misfit_db(const PlantModel& model, const MeasuredResponse& measured) {
     const std::vector<double> weights = fit_weights(measured);
     double sum = 0.0;
-    for (std::size_t i = 0; i < weights.size(); ++i) {
-        const double w = measured.w_rad_s[i];
-        const Complex response =
-            evaluate(model.roots, {0.0, w}) * std::polar(1.0, -w * model.dead_time_s);
-        sum += std::norm(weights[i] * (response / measured.response[i] - 1.0));
-    }
+    for (std::size_t i = 0; i < weights.size(); ++i)
+        sum += std::norm(weights[i] * relative_error(model, measured, i));
     return 20.0 * std::log10(1.0 + std::sqrt(sum / static_cast<double>(weights.size())));
+}
+
+std::vector<double> misfits_db(const PlantModel& model, const MeasuredResponse& measured) {
+    std::vector<double> misfits(measured.w_rad_s.size());
+    for (std::size_t i = 0; i < misfits.size(); ++i)
+        misfits[i] = 20.0 * std::log10(1.0 + std::abs(relative_error(model, measured, i)));
+    return misfits;
 }
 
 FitResult fit_model(const MeasuredResponse& measured, const FitOptions& options) {

@@ -52,4 +52,7 @@ std::vector<double> fit_weights(const MeasuredResponse& measured);
 /// 20 lg(1 + m), m the weighted rms of model/measured - 1.
 double misfit_db(const PlantModel& model, const MeasuredResponse& measured);
 
+/// 20 lg(1 + |model/measured - 1|) at every point, unweighted: where a misfit comes from.
+std::vector<double> misfits_db(const PlantModel& model, const MeasuredResponse& measured);
+
 } // namespace cornerwright

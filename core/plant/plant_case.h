@@ -3,6 +3,7 @@
 #include "core/numerics/root_form.h"
 #include "core/response/measured_response.h"
 
+#include <cstddef>
 #include <memory>
 #include <optional>
 #include <string>
@@ -46,6 +47,16 @@ struct FittedModel {
     bool operator==(const FittedModel&) const = default;
 };
 
+/// What was found in a measurement file when it was read.
+struct ReadingRecord {
+    std::size_t rows = 0;    ///< that gave the points
+    std::size_t skipped = 0; ///< that gave none
+    int first_skipped_line = 0;
+    std::string first_skipped_why;     ///< "not a number"; empty where none was skipped
+    std::vector<std::string> columns;  ///< as understood: "|P| [dB]: magnitude, dB"
+    std::vector<std::string> warnings; ///< whatever was assumed, averaged or left out
+};
+
 /// A measured unit. The points themselves are immutable and shared between copies of the project.
 struct MeasurementSource {
     std::string file;   ///< relative to the project file
@@ -54,6 +65,7 @@ struct MeasurementSource {
     int unstable_poles = 0;
     std::optional<FittedModel> fit;
     std::shared_ptr<const MeasuredResponse> response; ///< null where the file could not be loaded
+    std::shared_ptr<const ReadingRecord> reading;     ///< null where `response` is; not compared
 
     /// Compares what the project file holds, and the points by value.
     bool operator==(const MeasurementSource& other) const;

@@ -1,9 +1,9 @@
 #include "core/project/load_measurement.h"
 
-#include "core/measurement/read_measurement.h"
 #include "core/numerics/sha256.h"
 
 #include <fstream>
+#include <utility>
 #include <vector>
 
 namespace cornerwright {
@@ -16,7 +16,9 @@ void fill(MeasurementSource& source, const InputPlace& place, const std::string&
     if (!std::filesystem::is_regular_file(path, error))
         throw InputError(place, "the measurement file of " + where,
                          "no file \"" + source.file + "\" beside the project");
-    source.response = std::make_shared<const MeasuredResponse>(read_measurement(path).response);
+    ReadResult read = read_measurement(path);
+    source.reading = std::make_shared<const ReadingRecord>(record_of(read));
+    source.response = std::make_shared<const MeasuredResponse>(std::move(read.response));
     if (!source.sha256.empty() && sha256_of_file(path) != source.sha256)
         lookup.notices.push_back(where + ": \"" + source.file +
                                  "\" has changed since it was taken in (its SHA-256 differs from "
@@ -24,6 +26,21 @@ void fill(MeasurementSource& source, const InputPlace& place, const std::string&
 }
 
 } // namespace
+
+ReadingRecord record_of(const ReadResult& read) {
+    ReadingRecord record;
+    record.rows = read.rows;
+    record.skipped = read.skipped.size();
+    if (!read.skipped.empty()) {
+        record.first_skipped_line = read.skipped.front().line;
+        record.first_skipped_why = read.skipped.front().why;
+    }
+    for (const ColumnInfo& column : read.columns)
+        record.columns.push_back(column.heading + ": " + column.meaning +
+                                 (column.unit.empty() ? "" : ", " + column.unit));
+    record.warnings = read.warnings;
+    return record;
+}
 
 std::string sha256_of_file(const std::filesystem::path& file) {
     std::ifstream in(file, std::ios::binary);

@@ -2,6 +2,7 @@
 
 #include "core/measurement/read_measurement.h"
 #include "core/numerics/sha256.h"
+#include "core/project/load_measurement.h"
 
 #include <QCoreApplication>
 #include <QDir>
@@ -89,6 +90,7 @@ TakenMeasurement takeMeasurement(const QString& path, const QString& folder) {
     MeasurementSource source;
     source.file = QDir(folder).relativeFilePath(QFileInfo(path).absoluteFilePath()).toStdString();
     source.sha256 = hashOf(path);
+    source.reading = std::make_shared<const ReadingRecord>(record_of(read));
     source.response = std::make_shared<const MeasuredResponse>(std::move(read.response));
     taken.plantCase.source = std::move(source);
     return taken;

@@ -10,6 +10,7 @@ LiveContent::LiveContent(Document& document, ViewState& viewState, QObject* pare
         content_ = PaneContent();
         viewState_.setFrequencyWindowRadS(std::nullopt);
         viewState_.setSelectedSection(std::nullopt);
+        viewState_.setFollowed(std::nullopt);
         viewState_.setHiddenCases({});
         viewState_.setShownCase(0);
         Q_EMIT contentChanged();

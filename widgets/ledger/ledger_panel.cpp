@@ -136,6 +136,7 @@ void LedgerPanel::goToWorst(int row) {
     for (std::size_t i = 0; i < cases.size(); ++i) {
         if (cases[i].name == worst.case_name) {
             viewState_.setShownCase(i);
+            viewState_.setFollowed(FollowedRequirement{model_->requirementOf(row), i, worst.loop});
         }
     }
     if (!worst.at_rad_s.is_value() || worst.at_rad_s.value() <= 0.0) {

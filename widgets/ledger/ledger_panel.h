@@ -29,6 +29,8 @@ class LedgerPanel : public PanelFrame {
     void add(Measure measure);
     /// Selects the most pressing requirement and goes to where it is measured.
     void goToFirst();
+    /// Shows the case that stands for this row, marks the loop and the place it is measured at.
+    void goToWorst(int row);
     QMenu* addMenu() const { return addMenu_; }
     QTableView* view() const { return view_; }
     LedgerModel* model() const { return model_; }
@@ -41,7 +43,6 @@ class LedgerPanel : public PanelFrame {
     void buildView();
     void fitColumns();
     void dressHeader();
-    void goToWorst(int row);
     void edit(std::size_t requirement);
     void endEditing();
     void removeRequirement(std::size_t requirement);

@@ -2,6 +2,8 @@
 
 #include "widgets/figure_text.h"
 #include "widgets/panes/bode_pane.h"
+#include "widgets/panes/followed_place.h"
+#include "widgets/panes/margin_label.h"
 #include "widgets/panes/painting.h"
 #include "widgets/view_state.h"
 
@@ -147,7 +149,7 @@ void BodePane::drawCrossovers(QPainter& painter, const MarkedLoop& loop) const {
 }
 
 void BodePane::drawMargin(QPainter& painter, const MarginMark& mark, const MarkedLoop& loop,
-                          const Figure& figure, LabelPlacer& placer) const {
+                          LabelPlacer& placer) const {
     const QRectF area = plotArea();
     const double x = mapX().toPixel(mark.w_rad_s);
     if (x < area.left() || x > area.right())
@@ -156,32 +158,78 @@ void BodePane::drawMargin(QPainter& painter, const MarginMark& mark, const Marke
     const double from = bounded(mapY().toPixel(mark.from));
     const double to = bounded(mapY().toPixel(mark.to));
     const CaseAssessment* shown = shownCase(content().assessment);
-    const auto state = stateOf(content().assessment->verdict, mark.measure, shown->name, loop.loop);
-    const QColor colour = !mark.decides ? theme().colour(ColourRole::muted)
-                          : state       ? theme().state(*state)
-                                        : theme().colour(ColourRole::ink);
-    painter.setPen(QPen(colour, mark.decides ? 3.0 : 1.5, Qt::SolidLine, Qt::FlatCap));
+    painter.setPen(QPen(marginColour(mark, loop, *content().assessment, *shown, theme()),
+                        mark.decides ? 3.0 : 1.5, Qt::SolidLine, Qt::FlatCap));
     painter.drawLine(QPointF(x, from), QPointF(x, to));
     if (!mark.decides)
         return;
-    const bool hertz = viewState().showsHertz();
-    QString text = measureText(mark.measure).toLower() + QLatin1Char(' ') +
-                   figureText(figure, unit_of(mark.measure), hertz);
-    if (loop.loop == LoopName::realised)
-        text += QLatin1Char(' ') + tr("realised");
-    if (state)
-        text = markOf(*state) + QLatin1Char(' ') + text + QStringLiteral(" · ") + stateText(*state);
-    const bool isUnmet = state == State::unmet;
-    const LabelStyle style{colour, fontOf(FontRole::strong),
-                           isUnmet ? LabelGround::tinted : LabelGround::pane};
-    const QSizeF room = labelSize(text, style.font);
+    const MarginLabel label =
+        marginLabel(mark, loop, *content().assessment, *shown, theme(), viewState().showsHertz());
+    const QSizeF room = labelSize(label.text, label.style.font);
     const double middle = 0.5 * (from + to) - 0.5 * room.height();
     const QRectF place =
         placer.place(room, {QPointF(x + 8.0, middle), QPointF(x - 8.0 - room.width(), middle),
                             QPointF(x + 8.0, std::max(from, to) + 4.0),
                             QPointF(x + 8.0, std::min(from, to) - room.height() - 4.0),
                             QPointF(x - 8.0 - room.width(), std::max(from, to) + 4.0)});
-    drawLabel(painter, place, text, style, theme());
+    drawLabel(painter, place, label.text, label.style, theme());
+}
+
+void BodePane::drawFollowed(QPainter& painter, LabelPlacer& placer) const {
+    const Assessment& assessment = *content().assessment;
+    const Judgement* judgement = followedJudgement(viewState(), assessment);
+    const CaseAssessment* shown = shownCase(content().assessment);
+    if (judgement == nullptr || shown == nullptr || !judgement->at_rad_s.is_value())
+        return;
+    const LoopAssessment* loop = loopOf(*shown, judgement->loop);
+    const double w = judgement->at_rad_s.value();
+    const auto value = loop != nullptr
+                           ? interpolateOnLog(loop->curves.w_rad_s, loop->curves.*loop_, w)
+                           : std::nullopt;
+    if (!value)
+        return;
+    const QPointF at(mapX().toPixel(w), mapY().toPixel(*value));
+    if (plotArea().contains(at))
+        drawFollowedPlace(painter, at, viewState(), assessment, placer, theme(),
+                          marksMargin(followedMeasure(viewState(), assessment)) ? RingName::left_out
+                                                                                : RingName::shown);
+}
+
+void BodePane::drawWorstNames(QPainter& painter, LabelPlacer& placer) const {
+    const Assessment& assessment = *content().assessment;
+    for (const RequirementResult& result : assessment.verdict.requirements) {
+        if (!marksMargin(result.requirement.measure) || !result.worst.at_rad_s.is_value())
+            continue;
+        for (std::size_t i = 0; i < assessment.cases.size(); ++i) {
+            const CaseAssessment& item = assessment.cases[i];
+            if (item.name != result.worst.case_name || i == viewState().shownCase() || isHidden(i))
+                continue;
+            const double w = result.worst.at_rad_s.value();
+            const auto value =
+                interpolateOnLog(item.design.curves.w_rad_s, item.design.curves.*loop_, w);
+            if (!value)
+                continue;
+            const QPointF at(mapX().toPixel(w), mapY().toPixel(*value));
+            if (!plotArea().contains(at))
+                continue;
+            painter.setPen(Qt::NoPen);
+            painter.setBrush(theme().state(result.worst.state));
+            painter.drawEllipse(at, 3.5, 3.5);
+            const QString text = QString::fromStdString(item.name) + QLatin1Char(' ') +
+                                 figureText(result.worst.value, unit_of(result.requirement.measure),
+                                            viewState().showsHertz());
+            const LabelStyle style{theme().state(result.worst.state), fontOf(FontRole::small),
+                                   LabelGround::pane};
+            const QSizeF room = labelSize(text, style.font);
+            drawLabel(
+                painter,
+                placer.place(room, {at + QPointF(8.0, 4.0), at + QPointF(-8.0 - room.width(), 4.0),
+                                    at + QPointF(8.0, -4.0 - room.height()),
+                                    at + QPointF(-8.0 - room.width(), -4.0 - room.height()),
+                                    at + QPointF(8.0, 24.0)}),
+                text, style, theme());
+        }
+    }
 }
 
 void BodePane::drawReadings(QPainter& painter) const {

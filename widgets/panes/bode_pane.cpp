@@ -1,6 +1,7 @@
 #include "widgets/panes/bode_pane.h"
 
 #include "widgets/figure_text.h"
+#include "widgets/panes/case_choice.h"
 #include "widgets/panes/csv_table.h"
 #include "widgets/panes/legend_widget.h"
 #include "widgets/panes/painting.h"
@@ -57,9 +58,14 @@ void BodePane::drawCurves(QPainter& painter) {
     const auto& cases = content().assessment->cases;
     const QPen faintPlant = curvePen(colours.faint(ColourRole::graphite, faint_plant));
     const QPen faintLoop = curvePen(colours.faint(ColourRole::ink, faint_loop));
+    const QPen fullLoop = curvePen(colours.colour(ColourRole::ink));
+    const auto worst =
+        worstCases(*content().assessment, {Measure::phase_margin, Measure::gain_margin,
+                                           Measure::gain_reduction_margin, Measure::delay_margin});
     for (std::size_t i = 0; i < cases.size(); ++i)
         if (i != viewState().shownCase() && !isHidden(i))
-            drawCase(painter, cases[i].design.curves, faintPlant, faintLoop);
+            drawCase(painter, cases[i].design.curves, faintPlant,
+                     worst.contains(i) ? fullLoop : faintLoop);
 
     if (const CaseAssessment* trial = shownCase(content().trial))
         drawFunction(painter, curvePen(colours.colour(ColourRole::accent), 1.0, Qt::DashDotLine),
@@ -80,7 +86,7 @@ void BodePane::drawCurves(QPainter& painter) {
                      mapY());
 }
 
-std::optional<QPointF> BodePane::onLoop(double w) const {
+std::optional<QPointF> BodePane::pixelAtFrequency(double w) const {
     const CaseAssessment* shown = shownCase(content().assessment);
     if (shown == nullptr)
         return std::nullopt;
@@ -121,7 +127,7 @@ std::vector<Handle> BodePane::makeHandles() const {
         const auto corners = cornersOf(chain[i]);
         std::vector<QPointF> places;
         for (const SectionCorner& corner : corners) {
-            const auto at = onLoop(corner.w_rad_s);
+            const auto at = pixelAtFrequency(corner.w_rad_s);
             if (!at)
                 continue;
             places.push_back(keptInside(*at));
@@ -133,6 +139,7 @@ std::vector<Handle> BodePane::makeHandles() const {
             handle.name = corner.part == SectionPart::zero   ? tr("zero of %1").arg(name)
                           : corner.part == SectionPart::pole ? tr("pole of %1").arg(name)
                                                              : name;
+            handle.shiftIsFine = chain[i].kind != SectionKind::notch;
             handle.cursor = corner.complex_pair ? Qt::SizeAllCursor : Qt::SizeHorCursor;
             add(std::move(handle));
         }

@@ -19,6 +19,7 @@ class BodePane : public FrequencyPane {
              QWidget* parent);
 
     QString csv() const override;
+    std::optional<QPointF> pixelAtFrequency(double w_rad_s) const override;
 
   protected:
     void contentChanged() override;
@@ -37,14 +38,18 @@ class BodePane : public FrequencyPane {
     void drawHandles(QPainter& painter, LabelPlacer& placer) const;
     /// The linked cursor with the values of the shown case.
     void drawReadings(QPainter& painter) const;
-    /// Pixel on the loop curve of the shown case at `w`; empty where there is none.
-    std::optional<QPointF> onLoop(double w) const;
     /// The bar of a margin, and the figure beside the one that decides.
     void drawMargin(QPainter& painter, const MarginMark& mark, const MarkedLoop& loop,
-                    const Figure& figure, LabelPlacer& placer) const;
+                    LabelPlacer& placer) const;
     /// Where crossover lines stand: those of the loop whose phase margins are marked.
     void drawCrossovers(QPainter& painter, const MarkedLoop& loop) const;
     void drawReferenceLine(QPainter& painter, double value) const;
+    /// A ring where the followed requirement is measured on the loop curve.
+    void drawFollowed(QPainter& painter, LabelPlacer& placer) const;
+    /// The names of the other cases that stand for a requirement measured here, at that place.
+    void drawWorstNames(QPainter& painter, LabelPlacer& placer) const;
+    /// Margins that this pane marks with their figure.
+    virtual bool marksMargin(Measure measure) const = 0;
     /// Limits of the margins: short lines beside the margin's bar, which can be dragged.
     std::vector<Handle> limitHandles(const MarkedLoop& loop) const;
     void drawLimits(QPainter& painter, LabelPlacer& placer) const;

@@ -2,6 +2,7 @@
 
 #include <array>
 #include <charconv>
+#include <cmath>
 
 namespace cornerwright {
 
@@ -17,6 +18,8 @@ QString field(QString name) {
 }
 
 QString field(double number) {
+    if (std::isnan(number))
+        return {};
     std::array<char, 32> buffer{};
     const auto end = std::to_chars(buffer.data(), buffer.data() + buffer.size(), number).ptr;
     return QString::fromLatin1(buffer.data(), end - buffer.data());

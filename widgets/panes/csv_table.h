@@ -9,7 +9,7 @@
 namespace cornerwright {
 
 /// Rows of comma-separated values with a header; numbers in shortest round-trip form, names quoted
-/// where they must be (RFC 4180).
+/// where they must be (RFC 4180). What is not known (NaN) is an empty field.
 class CsvTable {
   public:
     explicit CsvTable(const QStringList& header);

@@ -37,6 +37,7 @@ struct Handle {
     QRectF area;  ///< where a press takes it
     QString name; ///< "zero of Lead", for the undo step and the label
     Qt::CursorShape cursor = Qt::SizeHorCursor;
+    bool shiftIsFine = true; ///< false where shift means something else (width of a notch)
 };
 
 /// A hand's way since the press, in pixels, with fine mode already worked in.

@@ -46,7 +46,7 @@ double MagnitudePane::decibelsOf(double upwardPixels) const {
 std::vector<Handle> MagnitudePane::makeHandles() const {
     std::vector<Handle> handles = BodePane::makeHandles();
     if (const CaseAssessment* shown = shownCase(content().assessment); shown && project()) {
-        auto limits = limitHandles(gainMargins(*shown));
+        auto limits = limitHandles(gainMargins(*shown, followedLoop()));
         std::move(limits.begin(), limits.end(), std::back_inserter(handles));
     }
     return handles;
@@ -57,7 +57,7 @@ std::optional<Handle> MagnitudePane::curveHandleAt(const QPointF& pixel) const {
         return std::nullopt;
     // On a steep flank the curve is near sideways before it is near upwards.
     for (double aside = -curve_reach; aside <= curve_reach; aside += 1.0) {
-        const auto at = onLoop(mapX().toValue(pixel.x() + aside));
+        const auto at = pixelAtFrequency(mapX().toValue(pixel.x() + aside));
         if (!at || std::hypot(aside, at->y() - pixel.y()) > curve_reach)
             continue;
         Handle handle;
@@ -159,22 +159,20 @@ void MagnitudePane::drawMarks(QPainter& painter) {
         return;
     }
     LabelPlacer placer(plotArea());
-    const MarkedLoop phase = phaseMargins(*shown);
-    const MarkedLoop gain = gainMargins(*shown);
+    const MarkedLoop phase = phaseMargins(*shown, followedLoop());
+    const MarkedLoop gain = gainMargins(*shown, followedLoop());
     drawReferenceLine(painter, 0.0);
     drawCrossovers(painter, phase);
     for (const Handle& handle : handles())
         placer.block(touchArea(handle.at, handleSize()));
-    const FrequencyFigures& figures = gain.assessment->figures.frequency;
     for (const MarginMark& mark : gain.marks)
-        drawMargin(painter, mark, gain,
-                   mark.measure == Measure::gain_margin ? figures.gain_margin_db
-                                                        : figures.gain_reduction_margin_db,
-                   placer);
+        drawMargin(painter, mark, gain, placer);
     drawCrossoverName(painter, phase, placer);
     drawStability(painter, placer);
     drawLimits(painter, placer);
     drawHandles(painter, placer);
+    drawFollowed(painter, placer);
+    drawWorstNames(painter, placer);
     drawReadings(painter);
 }
 

@@ -25,6 +25,9 @@ class MagnitudePane : public BodePane {
                                   const Project& project) const override;
     void fillMenu(QMenu& menu, const QPointF& pixel) override;
     double decibelsOf(double upwardPixels) const override;
+    bool marksMargin(Measure measure) const override {
+        return measure == Measure::gain_margin || measure == Measure::gain_reduction_margin;
+    }
     QString unit() const override { return QStringLiteral("db"); }
 
   private:

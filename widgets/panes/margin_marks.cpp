@@ -14,11 +14,15 @@ double sizeOf(const Figure& figure) {
     return figure.is_determined() ? std::abs(figure.value()) : HUGE_VAL;
 }
 
-const LoopAssessment& smallerOf(const CaseAssessment& shown, Figure FrequencyFigures::*figure,
-                                LoopName& loop) {
+const LoopAssessment& markedOf(const CaseAssessment& shown, std::optional<LoopName> wanted,
+                               Figure FrequencyFigures::*figure, LoopName& loop) {
     loop = LoopName::design;
-    if (!shown.realised)
+    if (!shown.realised || wanted == LoopName::design)
         return shown.design;
+    if (wanted == LoopName::realised) {
+        loop = LoopName::realised;
+        return *shown.realised;
+    }
     const double design = sizeOf(shown.design.figures.frequency.*figure);
     const double realised = sizeOf(shown.realised->figures.frequency.*figure);
     if (design <= realised)
@@ -39,9 +43,10 @@ double lineBelow(double phase_deg) {
 
 } // namespace
 
-MarkedLoop phaseMargins(const CaseAssessment& shown) {
+MarkedLoop phaseMargins(const CaseAssessment& shown, std::optional<LoopName> wanted) {
     MarkedLoop marked;
-    const LoopAssessment& loop = smallerOf(shown, &FrequencyFigures::phase_margin_deg, marked.loop);
+    const LoopAssessment& loop =
+        markedOf(shown, wanted, &FrequencyFigures::phase_margin_deg, marked.loop);
     marked.assessment = &loop;
     const FrequencyFigures& figures = loop.figures.frequency;
     for (const double w : figures.crossovers_rad_s) {
@@ -56,9 +61,10 @@ MarkedLoop phaseMargins(const CaseAssessment& shown) {
     return marked;
 }
 
-MarkedLoop gainMargins(const CaseAssessment& shown) {
+MarkedLoop gainMargins(const CaseAssessment& shown, std::optional<LoopName> wanted) {
     MarkedLoop marked;
-    const LoopAssessment& loop = smallerOf(shown, &FrequencyFigures::gain_margin_db, marked.loop);
+    const LoopAssessment& loop =
+        markedOf(shown, wanted, &FrequencyFigures::gain_margin_db, marked.loop);
     marked.assessment = &loop;
     const FrequencyFigures& figures = loop.figures.frequency;
     for (const double w : figures.phase_crossings_rad_s) {

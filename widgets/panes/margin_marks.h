@@ -23,12 +23,13 @@ struct MarkedLoop {
     std::vector<MarginMark> marks;
 };
 
-/// Phase margins at every crossover of the loop of this case that has the smaller one.
-MarkedLoop phaseMargins(const CaseAssessment& shown);
+/// Phase margins at every crossover of the loop of this case that is wanted, else of the one that
+/// has the smaller one.
+MarkedLoop phaseMargins(const CaseAssessment& shown, std::optional<LoopName> wanted = {});
 
-/// Gain and gain reduction margins at every phase crossing of the loop of this case that has the
-/// smaller gain margin.
-MarkedLoop gainMargins(const CaseAssessment& shown);
+/// Gain and gain reduction margins at every phase crossing of the loop of this case that is wanted,
+/// else of the one that has the smaller gain margin.
+MarkedLoop gainMargins(const CaseAssessment& shown, std::optional<LoopName> wanted = {});
 
 /// How a measure of one loop of one case stands: the worst state of its requirements; empty where
 /// nothing is required of it.

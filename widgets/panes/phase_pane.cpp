@@ -40,7 +40,7 @@ double PhasePane::decibelsOf(double upwardPixels) const {
 std::vector<Handle> PhasePane::makeHandles() const {
     std::vector<Handle> handles = BodePane::makeHandles();
     if (const CaseAssessment* shown = shownCase(content().assessment); shown && project()) {
-        auto limits = limitHandles(phaseMargins(*shown));
+        auto limits = limitHandles(phaseMargins(*shown, followedLoop()));
         std::move(limits.begin(), limits.end(), std::back_inserter(handles));
     }
     return handles;
@@ -53,7 +53,7 @@ void PhasePane::drawMarks(QPainter& painter) {
         return;
     }
     LabelPlacer placer(plotArea());
-    const MarkedLoop phase = phaseMargins(*shown);
+    const MarkedLoop phase = phaseMargins(*shown, followedLoop());
     drawReferenceLine(painter, -180.0);
     for (const MarginMark& mark : phase.marks)
         if (mark.from != -180.0)
@@ -62,10 +62,11 @@ void PhasePane::drawMarks(QPainter& painter) {
     for (const Handle& handle : handles())
         placer.block(touchArea(handle.at, handleSize()));
     for (const MarginMark& mark : phase.marks)
-        drawMargin(painter, mark, phase, phase.assessment->figures.frequency.phase_margin_deg,
-                   placer);
+        drawMargin(painter, mark, phase, placer);
     drawLimits(painter, placer);
     drawHandles(painter, placer);
+    drawFollowed(painter, placer);
+    drawWorstNames(painter, placer);
     drawReadings(painter);
 }
 

@@ -19,6 +19,7 @@ class PhasePane : public BodePane {
     void drawMarks(QPainter& painter) override;
     std::vector<Handle> makeHandles() const override;
     double decibelsOf(double upwardPixels) const override;
+    bool marksMargin(Measure measure) const override { return measure == Measure::phase_margin; }
     QString unit() const override { return QStringLiteral("deg"); }
 };
 

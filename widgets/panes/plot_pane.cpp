@@ -1,6 +1,7 @@
 #include "widgets/panes/plot_pane.h"
 
 #include "widgets/figure_text.h"
+#include "widgets/panes/followed_place.h"
 #include "widgets/panes/legend_widget.h"
 #include "widgets/view_state.h"
 
@@ -50,7 +51,7 @@ PlotPane::PlotPane(ViewState& state, QWidget* parent)
     : Pane(state, parent),
       legend_(new LegendWidget(this)),
       canvas_(
-          this, [this](QPainter& painter) { drawCurves(painter); },
+          this, [this](QPainter& painter) { paintCurves(painter); },
           [this](QPainter& painter) { paintMarks(painter); }) {
     auto* column = new QVBoxLayout(this);
     column->setContentsMargins(0, 0, 0, 0);
@@ -69,6 +70,7 @@ PlotPane::PlotPane(ViewState& state, QWidget* parent)
     });
     connect(&state, &ViewState::hiddenCasesChanged, this, [this] { redraw(); });
     connect(&state, &ViewState::unitChanged, this, [this] { redraw(); });
+    connect(&state, &ViewState::followedChanged, this, [this] { redraw(); });
     connect(&state, &ViewState::selectedSectionChanged, this, [this] {
         const auto section = viewState().selectedSection();
         const bool isOther = selected_ &&
@@ -117,6 +119,21 @@ PlotPane::shownCase(const std::shared_ptr<const Assessment>& assessment) const {
 
 bool PlotPane::isHidden(std::size_t caseIndex) const {
     return viewState().hiddenCases().contains(caseIndex);
+}
+
+std::optional<LoopName> PlotPane::followedLoop() const {
+    if (!content_.assessment)
+        return std::nullopt;
+    const Judgement* judgement = followedJudgement(viewState(), *content_.assessment);
+    return judgement != nullptr ? std::optional(judgement->loop) : std::nullopt;
+}
+
+void PlotPane::showOnlyShownCase() {
+    std::set<std::size_t> others;
+    for (std::size_t i = 0; content_.assessment && i < content_.assessment->cases.size(); ++i)
+        if (i != viewState().shownCase())
+            others.insert(i);
+    viewState().setHiddenCases(std::move(others));
 }
 
 void PlotPane::refitWhereNeeded() {
@@ -261,7 +278,8 @@ void PlotPane::moveHandle(const QPointF& mouse, Qt::KeyboardModifiers modifiers)
         dragBegins(drag_->handle.id);
         Q_EMIT dragStarted(tr("Move %1").arg(drag_->handle.name));
     }
-    drag_->travel += (shift ? fine_share : 1.0) * (mouse - drag_->lastMouse);
+    const bool isFine = shift && drag_->handle.shiftIsFine;
+    drag_->travel += (isFine ? fine_share : 1.0) * (mouse - drag_->lastMouse);
     const DragMotion motion{drag_->handle.at, drag_->handle.at + drag_->travel, shift};
     if (auto proposed = dragged(drag_->handle.id, motion, *drag_->start))
         Q_EMIT dragMoved(std::make_shared<const Project>(std::move(*proposed)));
@@ -292,9 +310,30 @@ void PlotPane::endDrag(bool keep) {
 void PlotPane::zoomInto(const QRectF& box) {
     if (box.width() < smallest_box || box.height() < smallest_box)
         return;
-    const QRectF inside = box.intersected(plotArea());
+    QRectF inside = box.intersected(plotArea());
+    if (zoomsBothAxes()) {
+        // The smallest box of the plot's own shape about the one drawn.
+        const double scale =
+            std::max(inside.width() / plotArea().width(), inside.height() / plotArea().height());
+        QRectF grown(QPointF(), scale * plotArea().size());
+        grown.moveCenter(inside.center());
+        inside = grown;
+    }
     setRangesByHand({{mapX().toValue(inside.left()), mapX().toValue(inside.right())},
                      {mapY().toValue(inside.bottom()), mapY().toValue(inside.top())}});
+}
+
+void PlotPane::keepShape() {
+    if (!zoomedByHand_) {
+        hasFitted_ = false;
+        refitWhereNeeded();
+        return;
+    }
+    const PlotRanges present = ranges();
+    const double perPixel = (present.x.high - present.x.low) / std::max(plotArea().width(), 1.0);
+    const double half = 0.5 * perPixel * plotArea().height();
+    const double middle = 0.5 * (present.y.low + present.y.high);
+    setRanges({present.x, {middle - half, middle + half}});
 }
 
 void PlotPane::wheelTurned(const QWheelEvent& event) {
@@ -349,6 +388,8 @@ bool PlotPane::eventFilter(QObject* watched, QEvent* event) {
         return false;
     case QEvent::Resize:
         redraw();
+        if (zoomsBothAxes()) // when the plot has taken its new size
+            QMetaObject::invokeMethod(this, &PlotPane::keepShape, Qt::QueuedConnection);
         return false;
     default:
         return false;
@@ -458,6 +499,11 @@ void PlotPane::contextMenuEvent(QContextMenuEvent* event) {
 
 void PlotPane::fillMenu(QMenu&, const QPointF&) {}
 
+void PlotPane::paintCurves(QPainter& painter) {
+    drawCurves(painter);
+    curvesAreOld_ = false;
+}
+
 void PlotPane::paintMarks(QPainter& painter) {
     drawMarks(painter);
     if (!drag_ || drag_->what != Drag::What::box || !drag_->begun)
@@ -471,6 +517,7 @@ void PlotPane::paintMarks(QPainter& painter) {
 
 void PlotPane::redraw() {
     handlesAreOld_ = true;
+    curvesAreOld_ = true;
     canvas_.redraw();
 }
 

@@ -47,7 +47,16 @@ class PlotPane : public Pane {
     const std::vector<Handle>& handles() const;
     QWidget* plotWidget() const { return canvas_.widget(); }
     bool isDragging() const { return drag_.has_value(); }
+    /// The curves have been drawn since the content or the axes last changed.
+    bool isUpToDate() const { return !curvesAreOld_; }
     PlotRanges ranges() const { return canvas_.ranges(); }
+    /// Zooms to these ranges, as a hand would.
+    void showRanges(const PlotRanges& ranges) { setRangesByHand(ranges); }
+    /// The plot inside its axes, in pixels of `plotWidget()`.
+    QRectF plotArea() const { return canvas_.area(); }
+    /// Where the shown case's loop stands at a frequency, in pixels of `plotWidget()`; empty
+    /// outside the curve and on panes that do not draw the loop.
+    virtual std::optional<QPointF> pixelAtFrequency(double) const { return std::nullopt; }
 
   protected:
     // What a pane says of itself.
@@ -72,7 +81,7 @@ class PlotPane : public Pane {
     virtual void rangesChangedByHand() {}
     virtual void aboutToFit() {}
     virtual void fillMenu(QMenu& menu, const QPointF& pixel);
-    /// Wheel and box act on both axes alike (planes).
+    /// Wheel and box act on both axes alike, and a unit is as long on both (planes).
     virtual bool zoomsBothAxes() const { return false; }
 
     const PaneContent& content() const { return content_; }
@@ -80,10 +89,11 @@ class PlotPane : public Pane {
     /// The shown case of an assessment; null where there is none or nothing could be computed.
     const CaseAssessment* shownCase(const std::shared_ptr<const Assessment>& assessment) const;
     bool isHidden(std::size_t caseIndex) const;
+    /// The loop of the shown case that the ledger led to; empty where it led nowhere here.
+    std::optional<LoopName> followedLoop() const;
 
     void setAxes(const AxisStyle& x, const AxisStyle& y) { canvas_.setAxes(x, y); }
     void setRanges(const PlotRanges& ranges);
-    QRectF plotArea() const { return canvas_.area(); }
     AxisMap mapX() const { return canvas_.mapX(); }
     AxisMap mapY() const { return canvas_.mapY(); }
 
@@ -135,6 +145,9 @@ class PlotPane : public Pane {
     void select(const std::optional<Handle>& handle);
     void setRangesByHand(const PlotRanges& ranges);
     void refitWhereNeeded();
+    void keepShape();
+    void showOnlyShownCase();
+    void paintCurves(QPainter& painter);
     void paintMarks(QPainter& painter);
     void addExportActions();
     void copyPicture();
@@ -145,6 +158,7 @@ class PlotPane : public Pane {
     PaneContent content_;
     mutable std::vector<Handle> handles_;
     mutable bool handlesAreOld_ = true;
+    bool curvesAreOld_ = true;
     std::optional<HandleId> hovered_;
     std::optional<Handle> selected_;
     bool zoomedByHand_ = false;

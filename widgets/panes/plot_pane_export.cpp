@@ -1,6 +1,7 @@
 // The commands of a plot pane that carry it out of the window: clipboard and files.
 
 #include "widgets/panes/plot_pane.h"
+#include "widgets/view_state.h"
 
 #include <QAction>
 #include <QClipboard>
@@ -30,6 +31,8 @@ QAction* PlotPane::addPaneAction(const QString& text, const std::function<void()
 
 void PlotPane::addExportActions() {
     addPaneAction(tr("Show all"), [this] { fit(); });
+    addPaneAction(tr("Hide the other cases"), [this] { showOnlyShownCase(); });
+    addPaneAction(tr("Show every case"), [this] { viewState().setHiddenCases({}); });
     addPaneAction(tr("Copy as picture"), [this] { copyPicture(); });
     addPaneAction(tr("Save picture …"), [this] { askAndSavePicture(); });
     addPaneAction(tr("Save data as CSV …"), [this] { askAndSaveData(); });

@@ -3,6 +3,7 @@
 #include "widgets/figure_text.h"
 #include "widgets/panes/axis_styles.h"
 #include "widgets/panes/csv_table.h"
+#include "widgets/panes/legend_widget.h"
 #include "widgets/panes/painting.h"
 #include "widgets/panes/section_edit.h"
 #include "widgets/view_state.h"
@@ -18,12 +19,26 @@ namespace {
 
 /// Fitting shows poles up to so many times the highest crossover.
 constexpr double fitted_crossovers = 4.0;
+constexpr double ghost_share = 0.5;
 
 } // namespace
 
 RootLocusPane::RootLocusPane(ViewState& state, QWidget* parent) : PlotPane(state, parent) {
     setAccessibleName(title());
     setAxes(linearAxis(QStringLiteral("rad/s")), linearAxis(QStringLiteral("rad/s")));
+    connect(&state, &ViewState::cursorChanged, this, [this] { redrawMarks(); });
+}
+
+void RootLocusPane::contentChanged() {
+    if (!content().ghost)
+        ghost_.reset();
+    else if (!ghost_)
+        ghost_ = content().locus;
+    const QColor ink = theme().colour(ColourRole::ink);
+    std::vector<LegendWidget::Entry> entries{{tr("branches"), curvePen(ink)}};
+    if (ghost_)
+        entries.push_back({tr("before"), curvePen(theme().faint(ColourRole::muted, ghost_share))});
+    legend().setEntries(std::move(entries));
 }
 
 QPointF RootLocusPane::toPixel(Complex s) const {
@@ -82,17 +97,66 @@ void RootLocusPane::drawCurves(QPainter& painter) {
     const QPointF origin = toPixel(0.0);
     painter.drawLine(QPointF(origin.x(), area.top()), QPointF(origin.x(), area.bottom()));
     painter.drawLine(QPointF(area.left(), origin.y()), QPointF(area.right(), origin.y()));
-    if (!content().locus)
-        return;
+    if (ghost_ && ghost_ != content().locus)
+        drawBranches(painter, *ghost_, curvePen(theme().faint(ColourRole::muted, ghost_share)));
+    if (content().locus)
+        drawBranches(painter, *content().locus, curvePen(theme().colour(ColourRole::ink)));
+}
+
+void RootLocusPane::drawBranches(QPainter& painter, const RootLocus& locus, const QPen& pen) const {
     const AxisMap x = mapX();
     const AxisMap y = mapY();
     std::vector<QPointF> pixels;
-    for (const LocusBranch& branch : content().locus->branches) {
+    for (const LocusBranch& branch : locus.branches) {
         pixels.clear();
         for (const Complex& s : branch.poles)
             pixels.emplace_back(x.toPixel(s.real()), y.toPixel(s.imag()));
-        drawPath(painter, curvePen(theme().colour(ColourRole::ink)), pixels, area);
+        drawPath(painter, pen, pixels, plotArea());
     }
+}
+
+void RootLocusPane::mouseAt(const QPointF& pixel) {
+    underMouse_.reset();
+    if (plotArea().contains(pixel)) {
+        underMouse_ = toPlane(pixel);
+        viewState().setCursorRadS(std::abs(*underMouse_));
+        redrawMarks();
+    } else {
+        viewState().setCursorRadS(std::nullopt);
+    }
+}
+
+void RootLocusPane::mouseLeft() {
+    underMouse_.reset();
+    viewState().setCursorRadS(std::nullopt);
+}
+
+void RootLocusPane::drawCursor(QPainter& painter) const {
+    const auto w = viewState().cursorRadS();
+    if (!w || isExporting())
+        return;
+    const QPointF origin = toPixel(0.0);
+    const QPointF reach = toPixel({*w, *w}) - origin;
+    painter.setPen(QPen(theme().colour(ColourRole::accent), 1.0));
+    painter.setBrush(Qt::NoBrush);
+    const QRectF circle(origin - QPointF(std::abs(reach.x()), std::abs(reach.y())),
+                        2.0 * QSizeF(std::abs(reach.x()), std::abs(reach.y())));
+    constexpr int quarter = 90 * 16; // angles of QPainter are in sixteenths of a degree
+    constexpr double largest = 1e5;  // pixels
+    if (circle.width() < largest)
+        painter.drawArc(circle, quarter, 2 * quarter);
+    QString text = QStringLiteral("|s| ") + frequencyText(*w, viewState().showsHertz());
+    if (underMouse_ && *w > 0.0)
+        text +=
+            QStringLiteral("   s ") + numberText(underMouse_->real()) +
+            (underMouse_->imag() < 0.0 ? QStringLiteral(" \u2212 j ") : QStringLiteral(" + j ")) +
+            numberText(std::abs(underMouse_->imag())) + QStringLiteral(" rad/s   ") +
+            tr("damping %1").arg(numberText(-underMouse_->real() / *w, 2));
+    const LabelStyle style{theme().colour(ColourRole::ink), fontOf(FontRole::small),
+                           LabelGround::pane};
+    const QSizeF room = labelSize(text, style.font);
+    drawLabel(painter, QRectF(plotArea().topLeft() + QPointF(4.0, 4.0), room), text, style,
+              theme());
 }
 
 std::vector<Handle> RootLocusPane::makeHandles() const {
@@ -274,6 +338,7 @@ void RootLocusPane::drawMarks(QPainter& painter) {
             painter.drawEllipse(handle.at, 2.0 * handleSize(), 2.0 * handleSize());
         }
     drawCrossings(painter);
+    drawCursor(painter);
     painter.restore();
     const QString note = QString::fromStdString(content().locus->note);
     painter.setFont(fontOf(FontRole::small));

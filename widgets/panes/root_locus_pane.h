@@ -17,6 +17,7 @@ class RootLocusPane : public PlotPane {
     QString csv() const override;
 
   protected:
+    void contentChanged() override;
     std::optional<PlotRanges> fittedRanges() const override;
     void drawCurves(QPainter& painter) override;
     void drawMarks(QPainter& painter) override;
@@ -26,6 +27,8 @@ class RootLocusPane : public PlotPane {
     std::optional<Project> nudged(const HandleId& handle, const QPointF& direction, double share,
                                   const Project& project) const override;
     void dragBegins(const HandleId& handle) override;
+    void mouseAt(const QPointF& pixel) override;
+    void mouseLeft() override;
     bool zoomsBothAxes() const override { return true; }
 
   private:
@@ -39,7 +42,12 @@ class RootLocusPane : public PlotPane {
     void drawRoot(QPainter& painter, const QPointF& at, bool isZero, const QColor& colour,
                   double size) const;
     void drawDrop(QPainter& painter, std::size_t branch, double size) const;
+    void drawBranches(QPainter& painter, const RootLocus& locus, const QPen& pen) const;
+    /// The linked cursor is the half circle |s| = w; under the mouse also s and its damping.
+    void drawCursor(QPainter& painter) const;
 
+    std::optional<Complex> underMouse_;
+    std::shared_ptr<const RootLocus> ghost_;      ///< at the start of anybody's drag
     std::shared_ptr<const RootLocus> startLocus_; ///< of the running drag
 };
 

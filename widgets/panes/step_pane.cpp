@@ -2,7 +2,9 @@
 
 #include "widgets/figure_text.h"
 #include "widgets/panes/axis_styles.h"
+#include "widgets/panes/case_choice.h"
 #include "widgets/panes/csv_table.h"
+#include "widgets/panes/followed_place.h"
 #include "widgets/panes/legend_widget.h"
 #include "widgets/panes/margin_marks.h"
 #include "widgets/panes/painting.h"
@@ -102,9 +104,11 @@ void StepPane::drawCurves(QPainter& painter) {
         drawFunction(painter, pen, step.t_s, signalOf(step), mapX(), mapY());
     };
     const auto& cases = content().assessment->cases;
+    const auto worst = worstHere();
     for (std::size_t i = 0; i < cases.size(); ++i)
         if (i != viewState().shownCase() && !isHidden(i))
-            draw(cases[i].design.step, curvePen(theme().faint(ColourRole::ink, faint_loop)));
+            draw(cases[i].design.step,
+                 curvePen(theme().faint(ColourRole::ink, worst.contains(i) ? 1.0 : faint_loop)));
     if (const CaseAssessment* trial = shownCase(content().trial))
         draw(trial->design.step,
              curvePen(theme().colour(ColourRole::accent), 1.0, Qt::DashDotLine));
@@ -117,6 +121,19 @@ void StepPane::drawCurves(QPainter& painter) {
     draw(shown->design.step, curvePen(ink, main_width));
     if (shown->realised)
         draw(shown->realised->step, curvePen(ink, main_width, Qt::DashLine));
+}
+
+std::set<std::size_t> StepPane::worstHere() const {
+    switch (signal_) {
+    case Signal::control:
+        return worstCases(*content().assessment, {Measure::control_peak});
+    case Signal::disturbance:
+        return worstCases(*content().assessment, {Measure::disturbance_peak});
+    case Signal::output:
+        break;
+    }
+    return worstCases(*content().assessment, {Measure::overshoot, Measure::settling_time,
+                                              Measure::rise_time, Measure::peak_time});
 }
 
 std::vector<Handle> StepPane::makeHandles() const {
@@ -212,7 +229,42 @@ void StepPane::drawMarks(QPainter& painter) {
                                 handle.at + QPointF(-0.5 * room.width(), 16.0)}),
             text, style, theme());
     }
+    if (shown != nullptr)
+        drawFollowed(painter, placer);
     drawReading(painter);
+}
+
+void StepPane::drawFollowed(QPainter& painter, LabelPlacer& placer) const {
+    const Assessment& assessment = *content().assessment;
+    const Judgement* judgement = followedJudgement(viewState(), assessment);
+    if (judgement == nullptr || signal_ != Signal::output)
+        return;
+    const LoopAssessment* loop = loopOf(*shownCase(content().assessment), judgement->loop);
+    if (loop == nullptr)
+        return;
+    const Measure measure = followedMeasure(viewState(), assessment);
+    const Figure& at =
+        measure == Measure::overshoot ? loop->figures.time.peak_time_s : judgement->value;
+    const bool isTime = measure == Measure::overshoot || measure == Measure::settling_time ||
+                        measure == Measure::peak_time;
+    if (!isTime || !at.is_value())
+        return;
+    const auto y = valueAt(loop->step, at.value());
+    if (!y)
+        return;
+    const QPointF place(mapX().toPixel(at.value()), mapY().toPixel(*y));
+    if (plotArea().contains(place))
+        drawFollowedPlace(painter, place, viewState(), assessment, placer, theme());
+}
+
+std::optional<double> StepPane::valueAt(const StepCurves& step, double t_s) const {
+    const auto& values = signalOf(step);
+    const auto above = std::upper_bound(step.t_s.begin(), step.t_s.end(), t_s);
+    if (above == step.t_s.begin() || above == step.t_s.end() || values.size() != step.t_s.size())
+        return std::nullopt;
+    const auto i = static_cast<std::size_t>(above - step.t_s.begin());
+    const double share = (t_s - step.t_s[i - 1]) / (step.t_s[i] - step.t_s[i - 1]);
+    return std::lerp(values[i - 1], values[i], share);
 }
 
 void StepPane::drawNote(QPainter& painter) const {
@@ -251,14 +303,11 @@ void StepPane::drawReading(QPainter& painter) const {
     painter.setPen(QPen(theme().colour(ColourRole::accent), 1.0));
     painter.drawLine(QPointF(x, area.top()), QPointF(x, area.bottom()));
     QString text = timeText(*cursor_);
-    const StepCurves& step = shown->design.step;
-    const auto& values = signalOf(step);
-    const auto above = std::upper_bound(step.t_s.begin(), step.t_s.end(), *cursor_);
-    if (above != step.t_s.begin() && above != step.t_s.end() && values.size() == step.t_s.size()) {
-        const auto i = static_cast<std::size_t>(above - step.t_s.begin());
-        const double share = (*cursor_ - step.t_s[i - 1]) / (step.t_s[i] - step.t_s[i - 1]);
-        text += QStringLiteral("   ") + numberText(std::lerp(values[i - 1], values[i], share));
-    }
+    if (const auto value = valueAt(shown->design.step, *cursor_))
+        text += QStringLiteral("   ") + tr("design") + QLatin1Char(' ') + numberText(*value);
+    if (shown->realised)
+        if (const auto value = valueAt(shown->realised->step, *cursor_))
+            text += QStringLiteral("   ") + tr("realised") + QLatin1Char(' ') + numberText(*value);
     const LabelStyle style{theme().colour(ColourRole::ink), fontOf(FontRole::small),
                            LabelGround::pane};
     const QSizeF room = labelSize(text, style.font);

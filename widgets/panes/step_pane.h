@@ -2,9 +2,11 @@
 
 #include "widgets/panes/plot_pane.h"
 
-class QAction;
+#include <set>
 
 namespace cornerwright {
+
+class LabelPlacer;
 
 /// Unit step on the reference (output or controller output) or on the disturbance. On the output
 /// the overshoot and settling requirements are lines that can be dragged.
@@ -35,8 +37,14 @@ class StepPane : public PlotPane {
 
   private:
     const std::vector<double>& signalOf(const StepCurves& curves) const;
+    /// The shown signal at a time, empty outside the curve.
+    std::optional<double> valueAt(const StepCurves& step, double t_s) const;
     /// Where the output of the shown case ends up; nothing on an unstable loop.
     std::optional<double> finalValue() const;
+    /// The measures whose worst case is drawn full beside the shown one.
+    std::set<std::size_t> worstHere() const;
+    /// A ring where overshoot or settling time of the followed requirement is read off.
+    void drawFollowed(QPainter& painter, LabelPlacer& placer) const;
     void drawNote(QPainter& painter) const;
     void drawReading(QPainter& painter) const;
 
