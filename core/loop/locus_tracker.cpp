@@ -159,7 +159,12 @@ std::optional<LocusState> jump(const LocusEquation& equation, const LocusState& 
                 poles[i] = fresh[partner[i]];
         }
     }
+    const ComplexVector as_arrived = poles;
     pair_conjugates(poles);
+    // Pairing gives the upper half plane to the earlier of two; a branch keeps its own.
+    for (std::size_t i = 0; i < poles.size(); ++i)
+        if (poles[i].imag() * as_arrived[i].imag() < 0.0)
+            poles[i] = std::conj(poles[i]);
     return locus_state(equation, to, std::move(poles));
 }
 

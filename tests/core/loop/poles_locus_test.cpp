@@ -92,6 +92,28 @@ TEST(RootLocus, BranchesKeepTheirIdentityThroughTheBreakaway) {
     EXPECT_EQ(locus.branches[2].poles.back().imag(), 0.0);
 }
 
+/// A pair far from the real axis was seen to change places with its twin where two other poles
+/// leave the axis.
+TEST(RootLocus, TwinsKeepTheirHalfPlaneWhileOthersBreakAway) {
+    const RootForm notched{
+        {Complex(-39.0, 779.0), Complex(-39.0, -779.0), -2.0, -25.0},
+        {Complex(-390.0, 675.5), Complex(-390.0, -675.5), 0.0, 0.0, -22.0, -300.0},
+        12672.0};
+    for (const double dead_time : {0.0, 0.0008}) {
+        const RootLocus locus = root_locus(loop_of(notched, dead_time));
+        bool breaks_away = false;
+        for (const LocusBranch& branch : locus.branches)
+            for (std::size_t k = 1; k < branch.poles.size(); ++k) {
+                const double before = branch.poles[k - 1].imag();
+                const double now = branch.poles[k].imag();
+                breaks_away = breaks_away || (before == 0.0) != (now == 0.0);
+                EXPECT_FALSE(before * now < 0.0)
+                    << dead_time << ": " << before << " to " << now << " at " << locus.factors[k];
+            }
+        EXPECT_TRUE(breaks_away);
+    }
+}
+
 TEST(RootLocus, StartsAtThePolesEndsAtTheZerosAndContainsThePresentGain) {
     const RootForm form{{-3.0, Complex(-1.0, 4.0), Complex(-1.0, -4.0)},
                         {0.0, -1.0, -6.0, Complex(-2.0, 2.0), Complex(-2.0, -2.0)},
