@@ -1,6 +1,7 @@
 #include "core/handover/evidence.h"
 
-#include "core/handover/report.h"
+#include "core/handover/cautions.h"
+#include "core/handover/realisation_study.h"
 #include "core/handover/report_tables.h"
 #include "core/handover/transfer_function_words.h"
 #include "core/numerics/number_text.h"
@@ -14,8 +15,10 @@ namespace {
 
 using Lines = std::vector<std::string>;
 
+constexpr int readable_digits = 15; // 0.0005 rather than 5e-04, and nothing rounded away
+
 void append(Lines& lines, Lines more) {
-    if (!lines.empty())
+    if (!lines.empty() && !more.empty())
         lines.emplace_back();
     lines.insert(lines.end(), more.begin(), more.end());
 }
@@ -46,8 +49,9 @@ Lines requirement_lines(const Assessment& assessment) {
 Lines rate_lines(const HandoverInput& input, const DifferenceEquation& equation) {
     const double period = equation.sample_period_s;
     const Realisation& realisation = equation.realisation;
-    Lines lines{"Sample period " + number_text(period) + " s (" + number_text(1.0 / period, 8) +
-                " Hz, " + number_text(2.0 * std::numbers::pi / period, 8) + " rad/s)"};
+    Lines lines{"Sample period " + number_text(period, readable_digits) + " s (" +
+                number_text(1.0 / period, 8) + " Hz, " +
+                number_text(2.0 * std::numbers::pi / period, 8) + " rad/s)"};
     if (input.project->sampling)
         lines.push_back("Computation delay " +
                         number_text(input.project->sampling->computation_delay_s) + " s");
@@ -76,8 +80,8 @@ Lines bound_lines(const DifferenceEquation& equation) {
     return lines;
 }
 
-Lines precision_lines(const DifferenceEquation& equation) {
-    Lines lines = bound_lines(equation);
+Lines noise_lines(const DifferenceEquation& equation) {
+    Lines lines;
     const RoundingNoise noise = rounding_noise(equation);
     lines.push_back("Rounding noise at the output: " + number_text(noise.simulated_rms, 3) +
                     " rms over " + std::to_string(noise.samples) +
@@ -116,6 +120,23 @@ Lines hash_lines(const HandoverInput& input) {
 }
 
 } // namespace
+
+std::vector<std::string> format_cost_lines(const Project& project,
+                                           const DifferenceEquation& equation) {
+    Lines lines = noise_lines(equation);
+    const Realisation& realisation = equation.realisation;
+    if (project.sampling) {
+        const Lines poles =
+            pole_error_words(pole_errors(project.compensator, *project.sampling, realisation));
+        lines.insert(lines.end(), poles.begin(), poles.end());
+    }
+    if (realisation.number_format.type == NumberFormat::Type::fixed) {
+        const auto to_the_end = [] { return true; };
+        lines.push_back(fraction_bits_words(
+            smallest_fraction_bits(project, realisation.number_format.word_bits, to_the_end)));
+    }
+    return lines;
+}
 
 std::string verdict_sentence(const Assessment& assessment) {
     if (assessment.verdict.requirements.empty())
@@ -197,7 +218,8 @@ std::vector<std::string> evidence_lines(const HandoverInput& input) {
     append(lines, difference_equation_words(equation));
     lines.insert(lines.end(), equation.notes.begin(), equation.notes.end());
     append(lines, limit_words(equation));
-    append(lines, precision_lines(equation));
+    append(lines, bound_lines(equation));
+    append(lines, format_cost_lines(*input.project, equation));
     append(lines, requirement_lines(assessment));
     append(lines, hash_lines(input));
     append(lines, {"Caution:"});

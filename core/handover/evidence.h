@@ -23,6 +23,12 @@ std::string caution_text();
 /// number format.
 std::vector<std::string> difference_equation_words(const DifferenceEquation& equation);
 
+/// What the number format does to the output and to the poles, in sentences: noise, zero-input
+/// limit cycle, smallest error still integrated, pole error of each structure, and for fixed point
+/// the smallest fraction bits that meet every requirement.
+std::vector<std::string> format_cost_lines(const Project& project,
+                                           const DifferenceEquation& equation);
+
 /// Output limits and bumpless start, in sentences.
 std::vector<std::string> limit_words(const DifferenceEquation& equation);
 

@@ -1,11 +1,11 @@
 #include "core/handover/report.h"
 
+#include "core/handover/cautions.h"
 #include "core/handover/markup.h"
 #include "core/handover/report_plots.h"
+#include "core/handover/report_realisation.h"
 #include "core/handover/report_tables.h"
 #include "core/numerics/number_text.h"
-
-#include <numbers>
 
 namespace cornerwright {
 namespace {
@@ -37,7 +37,8 @@ ReportPart requirements_part(const ReportInput& input) {
                                "(continuous compensator) and, where the project samples, on the "
                                "realised loop (the difference equation as it will run). The worst "
                                "stands for it. Headroom is the signed distance to the limit, "
-                               "positive where it is met.") +
+                               "positive where it is met; for times, frequencies and "
+                               "percentages a factor, above 1 where it is met.") +
                 requirement_table(*input.assessment),
             ""};
 }
@@ -76,62 +77,6 @@ ReportPart design_part(const ReportInput& input) {
             ""};
 }
 
-std::string sampling_words(const Sampling& sampling) {
-    const double rate = 1.0 / sampling.sample_period_s;
-    return "Sample period " + number_text(sampling.sample_period_s) + " s (" +
-           number_text(rate, 6) + " Hz), computation delay " +
-           number_text(sampling.computation_delay_s) + " s. " +
-           (sampling.design_includes_hold
-                ? "The design loop counts the hold and the computation delay; in its time "
-                  "responses the hold is a delay of half a period."
-                : "The design loop leaves hold and computation delay out.");
-}
-
-std::string equation_words(const DifferenceEquation& equation) {
-    const Realisation& realisation = equation.realisation;
-    std::string words = "Method <code>" + std::string(name_of(realisation.method)) + "</code>";
-    if (realisation.method == Method::tustin_at)
-        words += " exact at " + number_text(realisation.match_rad_s, 6) + " rad/s (" +
-                 number_text(realisation.match_rad_s / (2.0 * std::numbers::pi), 6) + " Hz)";
-    words += ", structure <code>" + std::string(name_of(realisation.structure)) +
-             "</code>, numbers <code>" + std::string(name_of(realisation.number_format.type)) +
-             "</code>";
-    if (realisation.number_format.type == NumberFormat::Type::fixed)
-        words += " of " + std::to_string(realisation.number_format.word_bits) + " bits with " +
-                 std::to_string(realisation.number_format.fraction_bits) + " fraction bits";
-    if (realisation.output_limits)
-        words += ". Output limited to " + number_text(realisation.output_limits->at_least) +
-                 " ... " + number_text(realisation.output_limits->at_most) +
-                 " with conditional integration";
-    return words + ".";
-}
-
-ReportPart realisation_part(const ReportInput& input) {
-    const Project& project = *input.project;
-    if (!project.sampling && !project.realisation)
-        return {};
-    std::string markup = html_heading(2, "Sampling and coefficients");
-    if (project.sampling)
-        markup += html_paragraph(sampling_words(*project.sampling));
-    if (!input.assessment->realisation_problem.empty())
-        markup += html_paragraph("There is no difference equation: " +
-                                 escaped(input.assessment->realisation_problem));
-    if (const auto& equation = input.assessment->equation) {
-        markup += html_paragraph(equation_words(*equation));
-        markup += html_paragraph(
-            equation->realisation.structure == Structure::delta
-                ? "Each section runs (beta0 d&sup2; + beta1 d + beta2)/(d&sup2; + alpha1 d + "
-                  "alpha2) with d = z - 1; the output of one is the input of the next."
-                : "Each section runs y = b0 x + b1 x&prime; + b2 x&Prime; - a1 y&prime; - a2 "
-                  "y&Prime; (primes: one and two samples ago; a1 and a2 are subtracted); the "
-                  "output of one is the input of the next. Values after rounding.");
-        markup += coefficient_table(*equation);
-        for (const std::string& note : equation->notes)
-            markup += html_paragraph(escaped(note));
-    }
-    return {markup, ""};
-}
-
 ReportPart notes_part(const ReportInput& input) {
     const std::string table = undetermined_table(*input.assessment);
     return {html_heading(2, "What was not determined, and remarks") +
@@ -167,20 +112,12 @@ ReportPart cautions_part() {
 
 } // namespace
 
-std::vector<std::string> cautions() {
-    return {"Closing a loop on real equipment can move, heat or energise it without warning.",
-            "First close it with limited effort, an independent stop, and nobody in reach.",
-            "These figures rest on the plant data given and say nothing of saturation, faults or "
-            "what was not measured.",
-            "Local codes, the machine's risk assessment and licensed practice decide."};
-}
-
 std::vector<ReportPart> review_report(const ReportInput& input) {
     std::vector<ReportPart> parts{opening(input), requirements_part(input)};
     append_plots(parts, input);
     parts.push_back(figures_part(input));
     parts.push_back(design_part(input));
-    parts.push_back(realisation_part(input));
+    parts.push_back({realisation_markup(*input.project, *input.assessment), ""});
     parts.push_back(notes_part(input));
     parts.push_back(definitions_part());
     parts.push_back(cautions_part());

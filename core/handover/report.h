@@ -34,8 +34,4 @@ std::string report_html(const ReportInput& input);
 /// The style sheet of the report, for whoever renders the parts otherwise.
 std::string report_style();
 
-/// The standing cautions, one sentence each. They accompany coefficients wherever these leave the
-/// program.
-std::vector<std::string> cautions();
-
 } // namespace cornerwright

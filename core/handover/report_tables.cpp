@@ -6,6 +6,7 @@
 #include <algorithm>
 #include <array>
 #include <cctype>
+#include <cmath>
 #include <numbers>
 #include <utility>
 
@@ -256,11 +257,15 @@ std::string requirement_table(const Assessment& assessment) {
     std::vector<Row> rows;
     for (const RequirementResult& result : assessment.verdict.requirements) {
         const MeasureUnit unit = unit_of(result.requirement.measure);
-        const bool logarithmic = unit != MeasureUnit::db && unit != MeasureUnit::deg;
+        // Beside a limit of 0 there is no ratio, only a difference.
+        const bool logarithmic = unit != MeasureUnit::db && unit != MeasureUnit::deg &&
+                                 result.requirement.at_least.value_or(1.0) != 0.0 &&
+                                 result.requirement.at_most.value_or(1.0) != 0.0;
         std::string headroom = figure_words(result.worst.headroom, 3);
         if (result.worst.headroom.is_value())
-            headroom +=
-                logarithmic ? " (logarithm of the ratio)" : " " + std::string(symbol_of(unit));
+            headroom = logarithmic ? "a factor of " +
+                                         number_text(std::exp(result.worst.headroom.value()), 3)
+                                   : headroom + " " + std::string(symbol_of(unit));
         rows.push_back(
             {escaped(measure_words(result.requirement)), escaped(result.limit),
              with_unit(result.worst.value, unit), place_words(result.worst), headroom,
@@ -311,7 +316,7 @@ std::string section_table(const Project& project) {
     std::size_t number = 0;
     for (const Section& section : project.compensator) {
         ++number;
-        std::string name = spaced(name_of(section.kind));
+        std::string name = section.kind == SectionKind::pi ? "PI" : spaced(name_of(section.kind));
         if (!section.label.empty())
             name += " &ldquo;" + escaped(section.label) + "&rdquo;";
         if (!section.enabled)

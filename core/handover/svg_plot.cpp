@@ -205,8 +205,13 @@ void SvgPlot::word(double x, double y, const std::string& text, const std::strin
     if (!is_inside(x, y))
         return;
     const bool to_the_left = x_of(x) > width_ * 0.7;
-    drawn_ += words(x_of(x) + (to_the_left ? -6.0 : 6.0), y_of(y) - 4.0, text,
-                    to_the_left ? "end" : "start", colour);
+    const auto written = [&](const std::string& fill, const std::string& extra) {
+        return words(x_of(x) + (to_the_left ? -6.0 : 6.0), y_of(y) - 4.0, text,
+                     to_the_left ? "end" : "start", fill, extra);
+    };
+    // A ground behind the letters, so that a curve below them does not strike them out.
+    drawn_ += written("#FFFFFF", " stroke=\"#FFFFFF\" stroke-width=\"3\" aria-hidden=\"true\"");
+    drawn_ += written(colour, "");
 }
 
 void SvgPlot::mark(double x, double y, Mark mark, const std::string& colour) {
@@ -276,8 +281,8 @@ std::string SvgPlot::svg() const {
     const std::string size = at(width_) + " " + at(height_);
     return "<svg xmlns=\"http://www.w3.org/2000/svg\" viewBox=\"0 0 " + size + "\" width=\"" +
            at(width_) + "\" height=\"" + at(height_) +
-           "\" role=\"img\" font-family=\"Inter, 'DejaVu Sans', Helvetica, sans-serif\" "
-           "font-size=\"11\">\n<title>" +
+           "\" role=\"img\" style=\"font-family:Inter,'DejaVu Sans',Helvetica,sans-serif;"
+           "font-size:11px\">\n<title>" +
            escaped(title_) + "</title>\n" + frame_and_ticks() + drawn_ + key_entries() + "</svg>\n";
 }
 

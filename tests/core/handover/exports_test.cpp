@@ -1,5 +1,5 @@
 // What every exported form must hold and what must be refused.
-#include "core/handover/report.h"
+#include "core/handover/cautions.h"
 #include "core/numerics/error.h"
 #include "tests/core/handover/handover_samples.h"
 #include "tests/core/realisation/section_builders.h"
