@@ -12,6 +12,14 @@ constexpr double pi = std::numbers::pi;
 /// Below this L counts as 0, where its sign at pi/Ts would be a matter of rounding.
 constexpr double zero_loop = 1e-10;
 
+/// A zero of L nearer to the axis than this part of its modulus lies on it but for rounding: L is 0
+/// there, not negative, however its phase passes.
+constexpr double on_axis = 1e-9;
+
+bool is_zero_of_loop(const CurvePoint& point) {
+    return std::abs(point.slope_after) * point.w_rad_s > 1.0 / on_axis;
+}
+
 struct LogMagnitude {
     static double value(const CurvePoint& p) { return p.loop_log; }
     static double before(const CurvePoint& p) { return p.slope_before.real(); }
@@ -108,7 +116,8 @@ class Search {
             // Between two bands lies the lower edge of the upper one.
             const double level = pi + 2.0 * pi * std::max(band, band + step);
             const CurvePoint crossing = passage_between(curve_, Phase{}, a, b, level);
-            found_.phase.push_back(crossing);
+            if (!is_zero_of_loop(crossing))
+                found_.phase.push_back(crossing);
             if (phases_complete())
                 return;
         }

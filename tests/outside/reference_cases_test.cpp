@@ -51,7 +51,7 @@ TEST_P(ReferenceCases, Agrees) {
         return;
     }
     for (const std::string& difference : all)
-        ADD_FAILURE() << difference;
+        ADD_FAILURE() << GetParam() << ": " << difference;
 }
 
 INSTANTIATE_TEST_SUITE_P(Folder, ReferenceCases, testing::ValuesIn(case_names()),

@@ -17,6 +17,7 @@ constexpr WideComplex j{0.0L, 1.0L};
 constexpr Wide pi = std::numbers::pi_v<Wide>;
 constexpr Wide frequency_tolerance = 1e-6L;
 constexpr Wide level_tolerance = 1e-4L; // dB and deg
+constexpr Wide negligible_loop = 1e-6L;
 constexpr Wide response_tolerance = 1e-8L;
 
 /// exp(jx) - 1 without loss near 0.
@@ -68,23 +69,31 @@ class SectionLoop {
         return value;
     }
 
-    /// Six decades below pi/Ts, closer around the plant's roots and towards pi/Ts.
-    std::vector<Wide> scan() const {
-        constexpr int points = 4000;
+    /// Nine decades below pi/Ts, closer around the plant's roots, the closed-loop poles and pi/Ts.
+    std::vector<Wide> scan(const Json& closed_loop_poles_z) const {
+        constexpr int points = 5000;
         std::vector<Wide> places;
         for (int i = 0; i <= points; ++i)
-            places.push_back(half_rate() * std::pow(10.0L, -6.0L * i / points));
+            places.push_back(half_rate() * std::pow(10.0L, -9.0L * i / points));
         for (int i = 1; i <= points; ++i)
             places.push_back(half_rate() * i / points);
+        const auto add_around = [&](Wide w, Wide width) {
+            for (int i = -100; i <= 100; ++i) {
+                const Wide place = w + width * std::sinh(i / 15.0L);
+                if (place > 0.0L && place < half_rate())
+                    places.push_back(place);
+            }
+        };
         for (const ComplexVector* roots : {&roots_.zeros, &roots_.poles})
             for (const Complex& root : *roots)
-                for (int i = -100; i <= 100; ++i) {
-                    const Wide w =
-                        std::abs(root.imag()) + std::abs(root.real()) * std::sinh(i / 15.0L);
-                    if (w > 0.0L && w < half_rate())
-                        places.push_back(w);
-                }
+                add_around(std::abs(root.imag()), std::abs(root.real()));
+        for (const Json& pole : closed_loop_poles_z) {
+            const Complex z(pole.at(0).get<double>(), pole.at(1).get<double>());
+            add_around(std::abs(std::arg(z)) / period_, std::abs(std::log(std::abs(z))) / period_);
+        }
         std::sort(places.begin(), places.end());
+        // The two roots of a pair give every place twice.
+        places.erase(std::unique(places.begin(), places.end()), places.end());
         return places;
     }
 
@@ -99,7 +108,10 @@ class SectionLoop {
 class Recomputation {
   public:
     Recomputation(std::string name, const SectionLoop& loop, const Json& printed)
-        : name_(std::move(name)), loop_(loop), printed_(printed), scan_(loop.scan()) {
+        : name_(std::move(name)),
+          loop_(loop),
+          printed_(printed),
+          scan_(loop.scan(printed.at("closed_loop_poles_z"))) {
         for (const Wide w : scan_)
             values_.push_back(loop_.loop(loop_.d(w)));
     }
@@ -151,14 +163,20 @@ class Recomputation {
         for (const Wide w : places) {
             const auto below = side(loop_.loop(loop_.d(w * (1.0L - frequency_tolerance))));
             const auto above = side(loop_.loop(loop_.d(w * (1.0L + frequency_tolerance))));
-            if (w > 0.0L && (!below || !above || *below == *above))
+            // Where |L| is under 1e-6 the place hangs on rounding.
+            if (w == 0.0L || std::abs(loop_.loop(loop_.d(w))) < negligible_loop)
+                continue;
+            if ((!below || !above || *below == *above))
                 add(figure, "no crossing at " + std::to_string(w));
         }
         for (std::size_t i = 1; i < scan_.size(); ++i) {
             const auto below = side(values_[i - 1]);
             const auto above = side(values_[i]);
-            // |L| under 1e-6 may be left out.
-            if (!below || !above || *below == *above || std::abs(values_[i]) < 1e-6L)
+            if (!below || !above || *below == *above || std::abs(values_[i]) < negligible_loop)
+                continue;
+            // Through a zero on the axis L jumps to the other side of 0.
+            constexpr Wide jump = 2.0L;
+            if (std::abs(std::arg(values_[i] * std::conj(values_[i - 1]))) > jump)
                 continue;
             const bool known = std::any_of(places.begin(), places.end(), [&](Wide w) {
                 return w >= scan_[i - 1] * (1.0L - frequency_tolerance) &&
@@ -232,9 +250,15 @@ class Recomputation {
         for (const Json& pole : printed_.at("closed_loop_poles_z")) {
             const WideComplex d(static_cast<Wide>(pole.at(0).get<double>()) - 1.0L,
                                 pole.at(1).get<double>());
+            // Near z = 0 stand the many poles of a delay, of which none is sharp.
             constexpr Wide smallest = 1e-3L;
-            const Wide off = std::abs(newton_step(d, 1e-3L * std::max(std::abs(d), smallest)));
-            if (!(off <= frequency_tolerance * std::max(std::abs(1.0L + d), smallest))) {
+            if (std::abs(1.0L + d) < smallest)
+                continue;
+            const auto step = newton_step(d, 1e-3L * std::max(std::abs(d), smallest));
+            if (!step)
+                continue;
+            const Wide off = std::abs(*step);
+            if (!(off <= frequency_tolerance * std::abs(1.0L + d))) {
                 std::ostringstream line;
                 line << pole << " is off by " << off;
                 add("closed_loop_poles_z", line.str());
@@ -243,17 +267,23 @@ class Recomputation {
     }
 
     /// Value over slope from places on a circle (Cauchy's integral formula): at `d` itself a root
-    /// common to plant and sections would give 0/0.
-    WideComplex newton_step(WideComplex d, Wide radius) const {
+    /// common to plant and sections would give 0/0. Nothing for a multiple root, which has no
+    /// slope.
+    std::optional<WideComplex> newton_step(WideComplex d, Wide radius) const {
         constexpr int places = 16;
         WideComplex value = 0.0L;
         WideComplex slope = 0.0L;
+        Wide largest = 0.0L;
         for (int i = 0; i < places; ++i) {
             const WideComplex direction = std::exp(2.0L * pi * j * ((i + 0.5L) / places));
             const WideComplex here = loop_.characteristic(d + radius * direction);
+            largest = std::max(largest, std::abs(here));
             value += here;
             slope += here / (radius * direction);
         }
+        constexpr Wide no_slope = 1e-6L;
+        if (std::abs(slope) * radius < no_slope * largest)
+            return std::nullopt;
         return value / slope;
     }
 
