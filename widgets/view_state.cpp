@@ -51,4 +51,11 @@ void ViewState::setFollowed(std::optional<FollowedRequirement> followed) {
     Q_EMIT followedChanged();
 }
 
+void ViewState::setUphill(std::vector<UphillPull> pulls) {
+    if (uphill_ == pulls)
+        return;
+    uphill_ = std::move(pulls);
+    Q_EMIT uphillChanged();
+}
+
 } // namespace cornerwright

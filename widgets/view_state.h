@@ -2,6 +2,7 @@
 
 #include "core/requirements/verdict.h"
 
+#include "widgets/uphill.h"
 
 #include <QObject>
 
@@ -9,6 +10,7 @@
 #include <optional>
 #include <set>
 #include <utility>
+#include <vector>
 
 namespace cornerwright {
 
@@ -58,6 +60,10 @@ class ViewState : public QObject {
     const std::optional<FollowedRequirement>& followed() const { return followed_; }
     void setFollowed(std::optional<FollowedRequirement> followed);
 
+    /// Which way every number of the chain raises the smallest headroom, of the latest project for
+    /// which that is known; empty where there is no such way.
+    const std::vector<UphillPull>& uphill() const { return uphill_; }
+    void setUphill(std::vector<UphillPull> pulls);
 
   signals:
     void unitChanged();
@@ -66,6 +72,7 @@ class ViewState : public QObject {
     void shownCaseChanged();
     void hiddenCasesChanged();
     void selectedSectionChanged();
+    void uphillChanged();
     void followedChanged();
 
   private:
@@ -75,6 +82,7 @@ class ViewState : public QObject {
     std::size_t shownCase_ = 0;
     std::set<std::size_t> hiddenCases_;
     std::optional<std::size_t> selectedSection_;
+    std::vector<UphillPull> uphill_;
     std::optional<FollowedRequirement> followed_;
 };
 

@@ -2,6 +2,7 @@
 
 #include "widgets/chain/chain_edits.h"
 #include "widgets/chain/section_card.h"
+#include "widgets/design/design_panel.h"
 #include "widgets/document/document.h"
 #include "widgets/figure_text.h"
 #include "widgets/parts/link_button.h"
@@ -28,6 +29,9 @@ ChainPanel::ChainPanel(Document& document, ViewState& viewState, QWidget* parent
       placeForNew_([] { return fallbackPlace; }),
       addButton_(new LinkButton(tr("+ add section"), this)),
       addMenu_(new QMenu(this)),
+      designButton_(new LinkButton(tr("design"), this)),
+      designMenu_(new QMenu(this)),
+      design_(new DesignPanel(document, viewState, this)),
       scroll_(new QScrollArea(this)),
       list_(new QWidget),
       listLayout_(new QVBoxLayout(list_)),
@@ -39,6 +43,13 @@ ChainPanel::ChainPanel(Document& document, ViewState& viewState, QWidget* parent
     addButton_->setAccessibleName(tr("Add section"));
     connect(addButton_, &LinkButton::clicked, this,
             [this] { addMenu_->popup(addButton_->mapToGlobal(QPoint(0, addButton_->height()))); });
+    designMenu_->setTitle(tr("Section design"));
+    designButton_->setAccessibleName(tr("Section design"));
+    designButton_->setToolTip(tr("Sections worked out from what is wanted"));
+    connect(designButton_, &LinkButton::clicked, this, [this] {
+        designMenu_->popup(designButton_->mapToGlobal(QPoint(0, designButton_->height())));
+    });
+    addToHead(designButton_);
     addToHead(addButton_);
 
     listLayout_->setContentsMargins(gap, 2, gap, 2);
@@ -52,7 +63,8 @@ ChainPanel::ChainPanel(Document& document, ViewState& viewState, QWidget* parent
     scroll_->setAccessibleName(tr("Sections"));
     scroll_->viewport()->setAutoFillBackground(false);
     list_->setAutoFillBackground(false);
-    body()->addWidget(scroll_);
+    body()->addWidget(scroll_, 1);
+    body()->addWidget(design_);
     dropLine_->setFrameShape(QFrame::HLine);
     dropLine_->setLineWidth(2);
     dropLine_->hide();

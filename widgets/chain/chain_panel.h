@@ -13,6 +13,7 @@ class QVBoxLayout;
 namespace cornerwright {
 
 class Document;
+class DesignPanel;
 class LinkButton;
 class SectionCard;
 class ViewState;
@@ -29,6 +30,10 @@ class ChainPanel : public PanelFrame {
     /// Adds a section of the kind at the end of the chain and selects it.
     void add(SectionKind kind);
     QMenu* addMenu() const { return addMenu_; }
+    /// The section design in the making, below the cards.
+    DesignPanel& design() const { return *design_; }
+    /// The menu behind "design" in the head; whoever owns the commands fills it.
+    QMenu* designMenu() const { return designMenu_; }
     const std::vector<SectionCard*>& cards() const { return cards_; }
 
   private:
@@ -45,6 +50,9 @@ class ChainPanel : public PanelFrame {
     std::function<double()> placeForNew_;
     LinkButton* addButton_;
     QMenu* addMenu_;
+    LinkButton* designButton_;
+    QMenu* designMenu_;
+    DesignPanel* design_;
     QScrollArea* scroll_;
     QWidget* list_;
     QVBoxLayout* listLayout_;

@@ -5,6 +5,7 @@
 #include "widgets/panes/followed_place.h"
 #include "widgets/panes/margin_label.h"
 #include "widgets/panes/painting.h"
+#include "widgets/panes/uphill_marks.h"
 #include "widgets/view_state.h"
 
 #include <algorithm>
@@ -70,6 +71,11 @@ void BodePane::drawHandles(QPainter& painter, LabelPlacer& placer) const {
         drawTriangle(painter, handle.at - half, 0.85 * grown, up, fill, line);
         drawTriangle(painter, handle.at + half, 0.85 * grown, isNotch ? !up : up, fill, line);
     }
+    for (const Handle& handle : all)
+        if (handle.id.kind == HandleKind::section_part)
+            drawUphillAside(painter, handle.at, size,
+                            uphillOf(viewState().uphill(), chain, handle.id.index, handle.id.part),
+                            theme());
     for (const Handle& handle : all)
         placer.block(touchArea(handle.at, size));
     for (const Handle& handle : all) {

@@ -14,6 +14,7 @@ FrequencyPane::FrequencyPane(ViewState& state, const AxisStyle& vertical, QWidge
     setAxes(frequencyAxis(state), vertical);
     setRanges({{1.0, 1000.0}, ranges().y});
     connect(&state, &ViewState::cursorChanged, this, [this] { redrawMarks(); });
+    connect(&state, &ViewState::uphillChanged, this, [this] { redrawMarks(); });
     connect(&state, &ViewState::frequencyWindowChanged, this, [this] { takeWindow(); });
 }
 

@@ -1,28 +1,11 @@
 #include "widgets/placement/placement_run.h"
 
-#include "core/engine/engine.h"
-#include "core/numerics/error.h"
+#include "core/engine/placement_problem.h"
 #include "core/placement/placement.h"
 
 #include <exception>
 
 namespace cornerwright {
-
-namespace {
-
-PlacementProblem problemOf(const Project& project) {
-    PlacementProblem problem;
-    problem.compensator = project.compensator;
-    problem.sampling = project.sampling;
-    problem.realisation = project.realisation;
-    problem.requirements = project.requirements;
-    for (const PlantCase& plantCase : project.plant_cases) {
-        problem.plants.push_back({plantCase.name, design_loop_of(project, plantCase).plant});
-    }
-    return problem;
-}
-
-} // namespace
 
 PlacementRun::~PlacementRun() {
     stop_ = true;
@@ -52,7 +35,7 @@ void PlacementRun::work(const ProjectPointer& project) {
         return !stop_;
     };
     try {
-        const PlacementResult result = place(problemOf(*project), options);
+        const PlacementResult result = place(placement_problem_of(*project), options);
         auto placed = std::make_shared<Project>(*project);
         placed->compensator = result.compensator;
         QStringList words;
