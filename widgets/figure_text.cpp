@@ -11,7 +11,7 @@ namespace cornerwright {
 namespace {
 
 QString tr(const char* text) {
-    return QCoreApplication::translate("figure_text", text);
+    return QCoreApplication::translate("cornerwright", text);
 }
 
 QString withTrueMinus(QString text) {
@@ -108,6 +108,20 @@ QString valueText(double value, MeasureUnit unit, bool hertz) {
     return numberText(value);
 }
 
+namespace {
+
+/// One standard deviation in two digits, however small.
+QString deviationText(double deviation, MeasureUnit unit, bool hertz) {
+    constexpr int digits = 2;
+    if (unit == MeasureUnit::deg)
+        return numberText(deviation, digits) + QChar(0xb0);
+    if (unit == MeasureUnit::db)
+        return numberText(deviation, digits) + QStringLiteral(" dB");
+    return valueText(deviation, unit, hertz);
+}
+
+} // namespace
+
 QString figureText(const Figure& figure, MeasureUnit unit, bool hertz) {
     switch (figure.kind()) {
     case Figure::Kind::undetermined:
@@ -119,7 +133,11 @@ QString figureText(const Figure& figure, MeasureUnit unit, bool hertz) {
     case Figure::Kind::value:
         break;
     }
-    return valueText(figure.value(), unit, hertz);
+    const QString value = valueText(figure.value(), unit, hertz);
+    if (figure.standard_deviation() > 0.0)
+        return QStringLiteral("%1 ± %2").arg(
+            value, deviationText(figure.standard_deviation(), unit, hertz));
+    return value;
 }
 
 QString limitText(const Requirement& requirement, bool hertz) {

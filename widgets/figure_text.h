@@ -32,7 +32,8 @@ QString decibelText(double db);
 /// One decimal: "41.9°".
 QString degreeText(double degrees);
 
-/// A figure with its unit. "∞", "−∞" where infinite, "?" where not determined.
+/// A figure with its unit; "41.9° ± 1.2°" with one standard deviation where one is known. "∞", "−∞"
+/// where infinite, "?" where not determined.
 QString figureText(const Figure& figure, MeasureUnit unit, bool hertz);
 /// A finite value in the unit of a measure.
 QString valueText(double value, MeasureUnit unit, bool hertz);

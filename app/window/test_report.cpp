@@ -1,34 +1,33 @@
 #include "app/window/test_report.h"
 
+#include "app/window/measurement_report.h"
+#include "app/window/menu_report.h"
 #include "widgets/chain/chain_panel.h"
 #include "widgets/chain/section_card.h"
+#include "widgets/fitting/fit_panel.h"
+#include "widgets/help/help_panel.h"
+#include "widgets/import/import_panel.h"
 #include "widgets/ledger/ledger_model.h"
 #include "widgets/ledger/ledger_panel.h"
 #include "widgets/panes/plot_pane.h"
 #include "widgets/parts/link_button.h"
 #include "widgets/parts/quantity_field.h"
 #include "widgets/window/main_window.h"
+#include "widgets/window/measurement_flow.h"
 #include "widgets/window/notice_strip.h"
 #include "widgets/window/work_area.h"
 
+#include <QApplication>
+#include <QCryptographicHash>
 #include <QJsonArray>
 #include <QJsonDocument>
 #include <QJsonObject>
+#include <QMenuBar>
 #include <QSaveFile>
-#include <QTimer>
 
 namespace cornerwright {
 
 namespace {
-
-QJsonObject placeOf(const QWidget& widget) {
-    const QPoint corner = widget.mapToGlobal(QPoint(0, 0));
-    return {{QStringLiteral("x"), corner.x()},
-            {QStringLiteral("y"), corner.y()},
-            {QStringLiteral("width"), widget.width()},
-            {QStringLiteral("height"), widget.height()},
-            {QStringLiteral("visible"), widget.isVisible()}};
-}
 
 QJsonValue figureOf(const Figure& figure) {
     return figure.is_value() ? QJsonValue(figure.value()) : QJsonValue();
@@ -86,15 +85,29 @@ QJsonArray noticesOf(const NoticeStrip& strip) {
 TestReport::TestReport(MainWindow& window, const QString& file)
     : QObject(&window), window_(window), file_(file) {
     // Written when the event loop has come to rest, so that layout and painting are done.
-    auto* later = new QTimer(this);
-    later->setSingleShot(true);
-    later->setInterval(50);
-    connect(later, &QTimer::timeout, this, &TestReport::write);
-    const auto soon = [later] { later->start(); };
+    later_.setSingleShot(true);
+    later_.setInterval(50);
+    connect(&later_, &QTimer::timeout, this, &TestReport::write);
+    const auto soon = [this] { later_.start(); };
     connect(&window.live(), &LiveContent::contentChanged, this, soon);
     connect(&window.document(), &Document::historyChanged, this, soon);
     connect(&window.document(), &Document::fileChanged, this, soon);
+    connect(&window.measurements().importPanel(), &ImportPanel::refreshed, this, soon);
+    connect(&window.measurements().importPanel(), &ImportPanel::closed, this, soon);
+    connect(&window.measurements().fitPanel(), &FitPanel::refreshed, this, soon);
+    connect(&window.measurements().fitPanel(), &FitPanel::closed, this, soon);
+    connect(&window.area(), &WorkArea::layoutChanged, this, soon);
+    connect(&window.viewState(), &ViewState::hiddenCasesChanged, this, soon);
+    qApp->installEventFilter(this);
     soon();
+}
+
+bool TestReport::eventFilter(QObject* watched, QEvent* event) {
+    const bool comesOrGoes = event->type() == QEvent::Show || event->type() == QEvent::Hide;
+    if (comesOrGoes && watched->isWidgetType()) {
+        later_.start();
+    }
+    return false;
 }
 
 void TestReport::write() {
@@ -104,9 +117,25 @@ void TestReport::write() {
     report[QStringLiteral("modified")] = window_.document().isModified();
     report[QStringLiteral("can_undo")] = window_.document().canUndo();
     report[QStringLiteral("file")] = window_.document().filePath();
+    report[QStringLiteral("project")] = QString::fromLatin1(
+        QCryptographicHash::hash(QByteArray::fromStdString(to_text(window_.document().project())),
+                                 QCryptographicHash::Sha256)
+            .toHex());
+    const QWidget* dialog = QApplication::activeModalWidget();
+    report[QStringLiteral("dialog")] = dialog == nullptr ? QString() : dialog->windowTitle();
+    report[QStringLiteral("menu_bar")] = menuBarReport(*window_.menuBar());
+    report[QStringLiteral("open_menus")] = openMenusReport();
+    report[QStringLiteral("help")] =
+        window_.help().isVisible() ? window_.help().topic() : QString();
     report[QStringLiteral("window")] = placeOf(window_);
     report[QStringLiteral("ledger")] = ledgerOf(*window_.ledger().model());
     report[QStringLiteral("notices")] = noticesOf(window_.notices());
+    const PaneContent& content = window_.live().content();
+    report[QStringLiteral("import")] = importReport(window_.measurements().importPanel());
+    report[QStringLiteral("fit")] = fitReport(window_.measurements().fitPanel());
+    report[QStringLiteral("cases")] =
+        caseReport(window_.document().project(), content.assessment.get());
+    report[QStringLiteral("locus")] = content.locus != nullptr;
     QJsonObject panes;
     for (const auto& [key, pane] : window_.area().panes()) {
         QJsonObject entry = placeOf(*pane);

@@ -2,6 +2,7 @@
 
 #include <QObject>
 #include <QString>
+#include <QTimer>
 
 namespace cornerwright {
 
@@ -16,11 +17,15 @@ class TestReport : public QObject {
   public:
     TestReport(MainWindow& window, const QString& file);
 
+  protected:
+    bool eventFilter(QObject* watched, QEvent* event) override;
+
   private:
     void write();
 
     MainWindow& window_;
     QString file_;
+    QTimer later_; ///< runs until the event loop has come to rest
     int number_ = 0;
 };
 

@@ -3,7 +3,6 @@
 #include "core/project/project.h"
 
 #include <QString>
-#include <QStringList>
 
 #include <cstddef>
 
@@ -19,15 +18,5 @@ QString freeCaseName(const Project& project, const QString& wanted,
 Project withCaseAdded(const Project& project, const PlantCase& plantCase);
 Project withCaseRemoved(const Project& project, std::size_t index);
 Project withCaseRenamed(const Project& project, std::size_t index, const QString& name);
-
-/// A measurement file made into a plant case, with what the user should know about it.
-struct TakenMeasurement {
-    PlantCase plantCase;
-    QStringList remarks; ///< rows skipped, what was assumed
-};
-
-/// Reads a measurement file and pins it by its hash; its name is told from `folder`. Throws
-/// InputError as the reader does.
-TakenMeasurement takeMeasurement(const QString& path, const QString& folder);
 
 } // namespace cornerwright

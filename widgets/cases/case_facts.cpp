@@ -13,7 +13,7 @@ namespace cornerwright {
 namespace {
 
 QString tr(const char* text) {
-    return QCoreApplication::translate("PlantCases", text);
+    return QCoreApplication::translate("cornerwright", text);
 }
 
 const QString separator = QStringLiteral(" · ");
@@ -59,6 +59,11 @@ QString caseFact(const PlantCase& plantCase) {
         return QString::fromStdString(formula->text);
     }
     return modelFact(plantCase.source);
+}
+
+bool isMeasured(const PlantCase& plantCase) {
+    const auto* measurement = std::get_if<MeasurementSource>(&plantCase.source);
+    return measurement != nullptr && measurement->response;
 }
 
 QString bindingFact(const Verdict& verdict, const std::string& caseName) {

@@ -12,6 +12,9 @@ namespace cornerwright {
 /// 2 zeros · dead time 800 µs", the formula, or why the case cannot be used.
 QString caseFact(const PlantCase& plantCase);
 
+/// Whether there are measured points that a model can be fitted to.
+bool isMeasured(const PlantCase& plantCase);
+
 /// "binds 2 requirements": of how many unmet or nearest requirements this case is the worst. Empty
 /// where it binds none.
 QString bindingFact(const Verdict& verdict, const std::string& caseName);

@@ -133,6 +133,11 @@ void CaseRow::keyPressEvent(QKeyEvent* event) {
     case Qt::Key_F2:
         beginNaming();
         return;
+    case Qt::Key_F:
+        if (measured_) {
+            Q_EMIT fitAsked();
+        }
+        return;
     case Qt::Key_Delete:
         Q_EMIT removeAsked();
         return;
@@ -162,6 +167,9 @@ void CaseRow::contextMenuEvent(QContextMenuEvent* event) {
     menu.addAction(check_->isChecked() ? tr("Do not draw it\tSpace") : tr("Draw it\tSpace"), this,
                    [this] { check_->toggle(); });
     menu.addAction(tr("Rename\tF2"), this, &CaseRow::beginNaming);
+    if (measured_) {
+        menu.addAction(tr("Fit a model\tF"), this, &CaseRow::fitAsked);
+    }
     menu.addSeparator();
     menu.addAction(tr("Remove\tDel"), this, &CaseRow::removeAsked);
     menu.exec(event->globalPos());

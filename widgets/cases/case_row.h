@@ -11,7 +11,8 @@ namespace cornerwright {
 class TextLabel;
 
 /// One plant case in the list: a check box that draws or hides it, its name and what is known of
-/// it. Keys: Enter shows it, space draws or hides it, F2 renames it, delete removes it.
+/// it. Keys: Enter shows it, space draws or hides it, F2 renames it, F fits a model to a measured
+/// one, delete removes it.
 class CaseRow : public QFrame {
     Q_OBJECT
 
@@ -21,6 +22,8 @@ class CaseRow : public QFrame {
     void setCase(const QString& name, const QString& fact, bool binds);
     void setDrawn(bool drawn);
     void setShown(bool shown);
+    /// Only a measured case has a model to be fitted.
+    void setMeasured(bool measured) { measured_ = measured; }
     QString name() const { return nameText_; }
     QCheckBox* checkBox() const { return check_; }
 
@@ -29,6 +32,7 @@ class CaseRow : public QFrame {
     void showAsked();
     void renameAsked(const QString& name);
     void removeAsked();
+    void fitAsked();
 
   protected:
     void paintEvent(QPaintEvent* event) override;
@@ -49,6 +53,7 @@ class CaseRow : public QFrame {
     QString factText_;
     bool shown_ = false;
     bool binds_ = false;
+    bool measured_ = false;
     QCheckBox* check_;
     TextLabel* name_;
     QLineEdit* nameEdit_;

@@ -22,7 +22,8 @@ CasesPanel::CasesPanel(Document& document, ViewState& viewState, QWidget* parent
       list_(new QWidget),
       listLayout_(new QVBoxLayout(list_)),
       formula_(new FormulaEntry(this)),
-      foot_(new TextLabel(QString(), TextLabel::Kind::muted, this)) {
+      foot_(new TextLabel(QString(), TextLabel::Kind::muted, this)),
+      fit_(new LinkButton(tr("fit a model"), this)) {
     auto* formulaButton = new LinkButton(tr("+ formula"), this);
     formulaButton->setAccessibleName(tr("Add a plant case from a formula"));
     auto* measurementButton = new LinkButton(tr("+ measurement"), this);
@@ -48,6 +49,9 @@ CasesPanel::CasesPanel(Document& document, ViewState& viewState, QWidget* parent
     body()->addWidget(scroll_, 1);
     body()->addWidget(formula_);
     body()->addWidget(foot_);
+    fit_->setAccessibleName(tr("Fit a model to the shown case"));
+    body()->addWidget(fit_, 0, Qt::AlignLeft);
+    connect(fit_, &LinkButton::clicked, this, [this] { Q_EMIT fitAsked(viewState_.shownCase()); });
 
     connect(formula_, &FormulaEntry::entered, this,
             [this](const QString& name, const QString& text) {
@@ -89,6 +93,7 @@ void CasesPanel::makeRows(std::size_t count) {
             document_.apply(withCaseRenamed(document_.project(), index, name),
                             tr("Rename case %1").arg(name));
         });
+        connect(row, &CaseRow::fitAsked, this, [this, index] { Q_EMIT fitAsked(index); });
         connect(row, &CaseRow::removeAsked, this, [this, index] {
             const QString name = rows_[index]->name();
             document_.apply(withCaseRemoved(document_.project(), index),
@@ -114,10 +119,12 @@ void CasesPanel::refresh() {
         facts << caseFact(plantCase);
         rows_[i]->setCase(QString::fromStdString(plantCase.name), facts.join(QStringLiteral(" · ")),
                           !binding.isEmpty());
+        rows_[i]->setMeasured(isMeasured(plantCase));
     }
     refreshMarks();
 
     const std::size_t shown = viewState_.shownCase();
+    fit_->setVisible(shown < rows_.size() && isMeasured(project.plant_cases[shown]));
     if (shown >= rows_.size()) {
         foot_->setText(tr("No plant yet: add a measurement or a formula."));
         return;

@@ -13,6 +13,7 @@ namespace cornerwright {
 class CaseRow;
 class Document;
 class FormulaEntry;
+class LinkButton;
 class TextLabel;
 class ViewState;
 
@@ -32,6 +33,8 @@ class CasesPanel : public PanelFrame {
   Q_SIGNALS:
     /// The person wants to choose measurement files.
     void measurementAsked();
+    /// The person wants a model of the case at `index`.
+    void fitAsked(std::size_t index);
 
   private:
     void refresh();
@@ -47,6 +50,7 @@ class CasesPanel : public PanelFrame {
     QVBoxLayout* listLayout_;
     FormulaEntry* formula_;
     TextLabel* foot_;
+    LinkButton* fit_;
     std::vector<CaseRow*> rows_;
 };
 

@@ -1,7 +1,6 @@
 #include "widgets/window/file_flow.h"
 
 #include "core/numerics/error.h"
-#include "widgets/cases/case_edits.h"
 #include "widgets/document/document.h"
 #include "widgets/window/notice_strip.h"
 
@@ -133,30 +132,8 @@ void FileFlow::chooseMeasurements() {
         QFileDialog::getOpenFileNames(window_, tr("Add measurements"), document_.folder(),
                                       tr("Measurements (*.csv *.txt *.dat *.tsv *.s?p *.ts *.uff "
                                          "*.unv *.58);;All files (*)"));
-    addMeasurements(paths);
-}
-
-void FileFlow::addMeasurements(const QStringList& paths) {
-    Project next = document_.project();
-    QStringList names;
-    for (const QString& path : paths) {
-        try {
-            TakenMeasurement taken = takeMeasurement(path, document_.folder());
-            const QString name = freeCaseName(next, QString::fromStdString(taken.plantCase.name));
-            taken.plantCase.name = name.toStdString();
-            next = withCaseAdded(next, taken.plantCase);
-            names << name;
-            if (!taken.remarks.isEmpty()) {
-                notices_.show(
-                    NoticeStrip::Kind::information,
-                    QStringLiteral("%1: %2").arg(name, taken.remarks.join(QLatin1Char(' '))));
-            }
-        } catch (const InputError& error) {
-            notices_.show(NoticeStrip::Kind::problem, QString::fromUtf8(error.what()));
-        }
-    }
-    if (!names.isEmpty()) {
-        document_.apply(std::move(next), tr("Add %1").arg(names.join(QStringLiteral(", "))));
+    if (!paths.isEmpty()) {
+        Q_EMIT measurementsGiven(paths);
     }
 }
 
@@ -169,7 +146,9 @@ void FileFlow::take(const QStringList& paths) {
         }
         measurements << path;
     }
-    addMeasurements(measurements);
+    if (!measurements.isEmpty()) {
+        Q_EMIT measurementsGiven(measurements);
+    }
 }
 
 void FileFlow::offerRecovery() {

@@ -15,7 +15,7 @@ class Document;
 class NoticeStrip;
 
 /// Everything about files: open, save, the question about unsaved changes, recent files, the
-/// recovery copy, measurements taken in. Trouble is told in the notice strip, nothing is lost.
+/// recovery copy, which measurement files are wanted. Trouble is told in the notice strip, nothing is lost.
 class FileFlow : public QObject {
     Q_OBJECT
 
@@ -35,8 +35,7 @@ class FileFlow : public QObject {
     bool saveTo(const QString& path);
 
     void chooseMeasurements();
-    void addMeasurements(const QStringList& paths);
-    /// Files dropped on the window: projects are opened, anything else is read as a measurement.
+    /// Files dropped on the window: projects are opened, anything else is taken for measurements.
     void take(const QStringList& paths);
 
     /// Runs `next` now, or once the person has decided about unsaved changes; not at all where they
@@ -47,6 +46,10 @@ class FileFlow : public QObject {
 
     QStringList recentPaths() const { return recent_.paths(); }
     RecoveryCopy& recovery() { return recovery_; }
+
+  Q_SIGNALS:
+    /// The person wants to take these measurement files in.
+    void measurementsGiven(const QStringList& paths);
 
   private:
     void openNow(const QString& path);

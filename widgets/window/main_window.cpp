@@ -7,12 +7,18 @@
 #include "widgets/handover/export_row.h"
 #include "widgets/handover/handover_flow.h"
 #include "widgets/handover/realisation_pane.h"
+#include "widgets/help/help_panel.h"
+#include "widgets/help/help_topic.h"
 #include "widgets/ledger/ledger_panel.h"
+#include "widgets/panes/plot_pane.h"
 #include "widgets/placement/placement_run.h"
 #include "widgets/trials/trial_menu.h"
 #include "widgets/window/about_page.h"
 #include "widgets/window/appearance.h"
+#include "widgets/window/design_commands.h"
 #include "widgets/window/file_flow.h"
+#include "widgets/window/language.h"
+#include "widgets/window/measurement_flow.h"
 #include "widgets/window/notice_strip.h"
 #include "widgets/window/pane_set.h"
 #include "widgets/window/pane_slot.h"
@@ -31,12 +37,15 @@
 #include <QTableView>
 #include <QVBoxLayout>
 
+#include <chrono>
+
 namespace cornerwright {
 
 namespace {
 
 constexpr QSize firstSize(1600, 950);
 const QString groundKey = QStringLiteral("ground");
+constexpr std::chrono::milliseconds layoutRest{1000};
 const QString geometryKey = QStringLiteral("geometry");
 
 QStringList localPaths(const QMimeData& data) {
@@ -60,20 +69,30 @@ MainWindow::MainWindow(const Places& places, QWidget* parent)
     build();
     files_ = new FileFlow(document_, *notices_, settings_, places.recoveryFolder, this);
     handover_ = new HandoverFlow(this);
+    measurements_ = new MeasurementFlow(document_, viewState_, *notices_, *pages_, this);
     placement_ = new PlacementRun(this);
+    designCommands_ = new DesignCommands(*this);
     fillMenus(*this);
     connectActions();
+    connectChoices();
+    connectHelp();
     connectSectionActions();
     connectDocument();
     connectPanes();
     connectTrials();
     connectHandover();
+    connectMeasurements();
     connectPlacement();
     showHistory();
     showCases();
     resize(firstSize);
     restoreGeometry(settings_.value(geometryKey).toByteArray());
     area_->restore(settings_);
+    // After a crash too, the window comes back as it was left.
+    layoutRest_.setSingleShot(true);
+    layoutRest_.setInterval(layoutRest);
+    connect(&layoutRest_, &QTimer::timeout, this, &MainWindow::saveLayout);
+    connect(area_, &WorkArea::layoutChanged, &layoutRest_, qOverload<>(&QTimer::start));
 }
 
 MainWindow::~MainWindow() = default;
@@ -88,6 +107,9 @@ void MainWindow::build() {
     makePanes(*area_, viewState_, trials_);
     auto* about = new AboutPage(this);
     status_ = new RunStatus(this);
+    help_ = new HelpPanel(HelpTexts(spokenLanguage()), this);
+    setHelpTopic(*cases_, QStringLiteral("plant_case"));
+    setHelpTopic(*bar_->pill(), QStringLiteral("verdict"));
     pages_ = new QStackedWidget(this);
     pages_->addWidget(area_);
     pages_->addWidget(about);
@@ -98,7 +120,11 @@ void MainWindow::build() {
     layout->setSpacing(0);
     layout->addWidget(bar_);
     layout->addWidget(notices_);
-    layout->addWidget(pages_, 1);
+    auto* middle = new QHBoxLayout;
+    middle->setSpacing(0);
+    middle->addWidget(pages_, 1);
+    middle->addWidget(help_);
+    layout->addLayout(middle, 1);
     layout->addWidget(status_);
     setCentralWidget(whole);
     connect(about, &AboutPage::closed, this, [this] { showAbout(false); });
@@ -116,10 +142,10 @@ void MainWindow::connectActions() {
     connect(actions_->redo, &QAction::triggered, &document_, &Document::redo);
     connect(actions_->addFormula, &QAction::triggered, cases_, &CasesPanel::beginFormula);
     connect(actions_->hertz, &QAction::toggled, &viewState_, &ViewState::setShowsHertz);
-    connect(actions_->grounds, &QActionGroup::triggered, this, [this](const QAction* action) {
-        applyAppearance(static_cast<Ground>(action->data().toInt()));
-        settings_.setValue(groundKey, action->data());
-    });
+    connect(actions_->onlyShownCase, &QAction::triggered, this, &MainWindow::drawOnlyShownCase);
+    connect(actions_->everyCase, &QAction::triggered, this,
+            [this] { viewState_.setHiddenCases({}); });
+    connect(actions_->printPane, &QAction::triggered, this, &MainWindow::printPane);
     connect(actions_->nextCase, &QAction::triggered, this, [this] { stepCase(1); });
     connect(actions_->previousCase, &QAction::triggered, this, [this] { stepCase(-1); });
     connect(actions_->wholePane, &QAction::triggered, this, &MainWindow::setWholePane);
@@ -128,6 +154,36 @@ void MainWindow::connectActions() {
     connect(bar_, &TopBar::caseChosen, this,
             [this](int index) { viewState_.setShownCase(static_cast<std::size_t>(index)); });
     connect(bar_->pill(), &VerdictPill::clicked, this, &MainWindow::goToWorst);
+}
+
+void MainWindow::connectChoices() {
+    const auto check = [](const QActionGroup& group, const QVariant& chosen) {
+        for (QAction* action : group.actions()) {
+            action->setChecked(action->data() == chosen);
+        }
+    };
+    check(*actions_->grounds, static_cast<int>(rememberedGround()));
+    check(*actions_->languageChoices, rememberedLanguage(settings_));
+    connect(actions_->languageChoices, &QActionGroup::triggered, this,
+            [this](const QAction* action) {
+                rememberLanguage(settings_, action->data().toString());
+                notices_->show(NoticeStrip::Kind::information,
+                               tr("The language changes when the program is started next."),
+                               QStringLiteral("language"));
+            });
+    connect(actions_->grounds, &QActionGroup::triggered, this, [this](const QAction* action) {
+        applyAppearance(static_cast<Ground>(action->data().toInt()));
+        settings_.setValue(groundKey, action->data());
+    });
+}
+
+void MainWindow::connectHelp() {
+    connect(area_, &WorkArea::helpAsked, help_, &HelpPanel::explain);
+    connect(ledger_, &LedgerPanel::helpAsked, help_, &HelpPanel::explain);
+    connect(actions_->explain, &QAction::triggered, this,
+            [this] { help_->explain(helpTopicOf(QApplication::focusWidget())); });
+    connect(actions_->windowHelp, &QAction::triggered, this,
+            [this] { help_->explain(QStringLiteral("window")); });
 }
 
 void MainWindow::connectSectionActions() {
@@ -194,6 +250,9 @@ void MainWindow::connectDocument() {
 
 void MainWindow::connectPanes() {
     for (const auto& [key, pane] : area_->panes()) {
+        connect(pane, &Pane::failed, this, [this](const QString& why) {
+            notices_->show(NoticeStrip::Kind::problem, why, QStringLiteral("pane"));
+        });
         connect(pane, &Pane::dragStarted, &document_, &Document::beginDrag);
         connect(pane, &Pane::dragMoved, &document_, &Document::previewDrag);
         connect(pane, &Pane::dragFinished, &document_, &Document::commitDrag);
@@ -238,6 +297,13 @@ void MainWindow::connectHandover() {
     });
 }
 
+void MainWindow::connectMeasurements() {
+    connect(files_, &FileFlow::measurementsGiven, measurements_, &MeasurementFlow::takeIn);
+    connect(cases_, &CasesPanel::fitAsked, measurements_, &MeasurementFlow::fit);
+    connect(actions_->fitModel, &QAction::triggered, this,
+            [this] { measurements_->fit(viewState_.shownCase()); });
+}
+
 void MainWindow::connectPlacement() {
     connect(actions_->place, &QAction::triggered, this, [this] {
         document_.cancelDrag();
@@ -277,6 +343,7 @@ void MainWindow::showContent() {
     ledger_->setContent(content);
     cases_->setContent(content);
     handover_->setContent(content);
+    designCommands_->setContent(content);
     bar_->pill()->setVerdict(content.assessment ? &content.assessment->verdict : nullptr,
                              viewState_.showsHertz());
 }
@@ -325,6 +392,34 @@ void MainWindow::setWholePane() {
     area_->setWhole(widget != nullptr && widget != area_->whole() ? widget : nullptr);
 }
 
+void MainWindow::printPane() {
+    for (QWidget* at = QApplication::focusWidget(); at != nullptr; at = at->parentWidget()) {
+        if (auto* pane = qobject_cast<PlotPane*>(at)) {
+            pane->askAndPrint();
+            return;
+        }
+    }
+    notices_->show(NoticeStrip::Kind::information,
+                   tr("Click the pane to print first, or print it from the menu Panes."),
+                   QStringLiteral("print"));
+}
+
+void MainWindow::drawOnlyShownCase() {
+    std::set<std::size_t> hidden;
+    for (std::size_t i = 0; i < document_.project().plant_cases.size(); ++i) {
+        if (i != viewState_.shownCase()) {
+            hidden.insert(i);
+        }
+    }
+    viewState_.setHiddenCases(std::move(hidden));
+}
+
+void MainWindow::saveLayout() {
+    settings_.setValue(geometryKey, saveGeometry());
+    area_->save(settings_);
+    settings_.sync();
+}
+
 Ground MainWindow::rememberedGround() const {
     return static_cast<Ground>(settings_.value(groundKey, 0).toInt());
 }
@@ -340,8 +435,7 @@ void MainWindow::closeEvent(QCloseEvent* event) {
             });
         return;
     }
-    settings_.setValue(geometryKey, saveGeometry());
-    area_->save(settings_);
+    saveLayout();
     event->accept();
 }
 
@@ -354,6 +448,16 @@ void MainWindow::dragEnterEvent(QDragEnterEvent* event) {
 void MainWindow::dropEvent(QDropEvent* event) {
     files_->take(localPaths(*event->mimeData()));
     event->acceptProposedAction();
+}
+
+void MainWindow::moveEvent(QMoveEvent* event) {
+    QMainWindow::moveEvent(event);
+    layoutRest_.start();
+}
+
+void MainWindow::resizeEvent(QResizeEvent* event) {
+    QMainWindow::resizeEvent(event);
+    layoutRest_.start();
 }
 
 bool MainWindow::event(QEvent* event) {

@@ -8,6 +8,7 @@
 
 #include <QMainWindow>
 #include <QSettings>
+#include <QTimer>
 
 #include <memory>
 
@@ -17,9 +18,12 @@ namespace cornerwright {
 
 class CasesPanel;
 class ChainPanel;
+class DesignCommands;
 class FileFlow;
 class HandoverFlow;
+class HelpPanel;
 class LedgerPanel;
+class MeasurementFlow;
 class NoticeStrip;
 class PlacementRun;
 class RunStatus;
@@ -51,12 +55,15 @@ class MainWindow : public QMainWindow {
     TrialBook& trials() { return trials_; }
     FileFlow& files() { return *files_; }
     HandoverFlow& handover() { return *handover_; }
+    DesignCommands& designCommands() { return *designCommands_; }
+    MeasurementFlow& measurements() { return *measurements_; }
     PlacementRun& placement() { return *placement_; }
     WorkArea& area() { return *area_; }
     ChainPanel& chain() { return *chain_; }
     CasesPanel& cases() { return *cases_; }
     LedgerPanel& ledger() { return *ledger_; }
     NoticeStrip& notices() { return *notices_; }
+    HelpPanel& help() { return *help_; }
     WindowActions& actions() { return *actions_; }
 
   protected:
@@ -64,15 +71,20 @@ class MainWindow : public QMainWindow {
     void dragEnterEvent(QDragEnterEvent* event) override;
     void dropEvent(QDropEvent* event) override;
     bool event(QEvent* event) override;
+    void moveEvent(QMoveEvent* event) override;
+    void resizeEvent(QResizeEvent* event) override;
 
   private:
     void build();
     void connectActions();
+    void connectChoices();
+    void connectHelp();
     void connectSectionActions();
     void connectDocument();
     void connectPanes();
     void connectTrials();
     void connectHandover();
+    void connectMeasurements();
     void connectPlacement();
     void takePlacement(const ProjectPointer& start, const ProjectPointer& placed,
                        const QStringList& words);
@@ -83,6 +95,9 @@ class MainWindow : public QMainWindow {
     void stepCase(int by);
     void goToWorst();
     void setWholePane();
+    void printPane();
+    void drawOnlyShownCase();
+    void saveLayout();
 
     QSettings settings_;
     Document document_;
@@ -98,9 +113,13 @@ class MainWindow : public QMainWindow {
     LedgerPanel* ledger_;
     WorkArea* area_;
     RunStatus* status_;
+    HelpPanel* help_;
+    QTimer layoutRest_; ///< runs while the layout is being changed
     FileFlow* files_;
     HandoverFlow* handover_;
+    MeasurementFlow* measurements_;
     PlacementRun* placement_;
+    DesignCommands* designCommands_;
     bool mayClose_ = false;
 };
 

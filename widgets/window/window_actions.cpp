@@ -1,13 +1,23 @@
 #include "widgets/window/window_actions.h"
 
 #include "widgets/window/appearance.h"
+#include "widgets/window/language.h"
 
 #include <QKeySequence>
+#include <QLocale>
 #include <QWidget>
 
 namespace cornerwright {
 
 WindowActions::WindowActions(QWidget* window) : QObject(window), window_(window) {
+    makeFileActions();
+    makeEditActions();
+    makeViewActions();
+    makeDesignActions();
+    makeHelpActions();
+}
+
+void WindowActions::makeFileActions() {
     newProject = make(tr("&New"), QKeySequence::New, tr("Start an empty project"));
     open = make(tr("&Open"), QKeySequence::Open, tr("Open a project file"));
     save = make(tr("&Save"), QKeySequence::Save, tr("Save the project"));
@@ -15,9 +25,13 @@ WindowActions::WindowActions(QWidget* window) : QObject(window), window_(window)
                   tr("Save the project under another name"));
     addMeasurements = make(tr("Add &measurements"), QKeySequence(Qt::CTRL | Qt::Key_M),
                            tr("Take measurement files in as plant cases"));
+    printPane = make(tr("&Print pane"), QKeySequence(Qt::CTRL | Qt::Key_P),
+                     tr("Print the pane with the focus"));
     quit = make(tr("&Quit"), QKeySequence(Qt::CTRL | Qt::Key_Q), tr("Leave the program"));
     quit->setMenuRole(QAction::QuitRole);
+}
 
+void WindowActions::makeEditActions() {
     undo = make(tr("&Undo"), QKeySequence::Undo, tr("Take the last step back"));
     redo =
         make(tr("&Redo"), QKeySequence(Qt::CTRL | Qt::SHIFT | Qt::Key_Z), tr("Do the step again"));
@@ -31,7 +45,9 @@ WindowActions::WindowActions(QWidget* window) : QObject(window), window_(window)
                          tr("Turn the selected section off or on"));
     lockSection = make(tr("&Lock or unlock section"), QKeySequence(Qt::CTRL | Qt::Key_L),
                        tr("Locked corners stay where they are"));
+}
 
+void WindowActions::makeViewActions() {
     hertz = make(tr("&Hz instead of rad/s"), QKeySequence(Qt::CTRL | Qt::Key_H),
                  tr("Show frequencies in Hz or in rad/s"));
     hertz->setCheckable(true);
@@ -40,6 +56,19 @@ WindowActions::WindowActions(QWidget* window) : QObject(window), window_(window)
                     tr("Show the next plant case"));
     previousCase = make(tr("&Previous case"), QKeySequence(Qt::CTRL | Qt::Key_PageUp),
                         tr("Show the plant case before"));
+    onlyShownCase = make(tr("Draw &only the shown case"), QKeySequence(Qt::CTRL | Qt::Key_1),
+                         tr("The others are not drawn; they are judged all the same"));
+    everyCase = make(tr("Draw &every case"), QKeySequence(Qt::CTRL | Qt::Key_0),
+                     tr("Draw the curves of every plant case"));
+    languageChoices = new QActionGroup(this);
+    for (const QString& code : QStringList{QString()} + languages()) {
+        const QString name = code.isEmpty() ? tr("Language as the system has it")
+                                            : QLocale(code).nativeLanguageName();
+        QAction* action = make(name, QKeySequence(), name);
+        action->setCheckable(true);
+        action->setData(code);
+        languageChoices->addAction(action);
+    }
     grounds = new QActionGroup(this);
     const std::pair<QString, Ground> names[] = {{tr("Ground as the system has it"), Ground::system},
                                                 {tr("Light ground"), Ground::light},
@@ -54,7 +83,9 @@ WindowActions::WindowActions(QWidget* window) : QObject(window), window_(window)
                      tr("The pane with the focus takes the whole window"));
     allPanes = make(tr("&All panes again"), QKeySequence(Qt::SHIFT | Qt::Key_F11),
                     tr("Go back to all panes"));
+}
 
+void WindowActions::makeDesignActions() {
     keepTrial = make(tr("&Keep as trial"), QKeySequence(Qt::CTRL | Qt::Key_K),
                      tr("Keep a copy of this design to compare against"));
     keepTrial->setIconText(tr("Keep"));
@@ -63,13 +94,21 @@ WindowActions::WindowActions(QWidget* window) : QObject(window), window_(window)
     place = make(tr("&Place corners"), QKeySequence(Qt::CTRL | Qt::Key_E),
                  tr("Move the unlocked corners so that the smallest headroom grows"));
     place->setIconText(tr("Place"));
+    fitModel = make(tr("&Fit a model to the shown case"), QKeySequence(Qt::CTRL | Qt::Key_G),
+                    tr("Fit a rational model to the measured case, for root locus and step"));
     showHandover = make(tr("&Handover"), QKeySequence(Qt::CTRL | Qt::Key_D),
                         tr("Sampling and realisation: what the firmware gets"));
 
-    writeReport = make(tr("Write &report"), QKeySequence(Qt::CTRL | Qt::Key_P),
+    writeReport = make(tr("Write &report"), QKeySequence(Qt::CTRL | Qt::Key_R),
                        tr("Write the design review report as one HTML file"));
     writeReport->setIconText(tr("Report"));
+}
 
+void WindowActions::makeHelpActions() {
+    explain = make(tr("&What is this?"), QKeySequence(Qt::Key_F1),
+                   tr("Explain what has the focus: definition, formula, source"));
+    windowHelp = make(tr("Mouse, &keys and files"), QKeySequence(Qt::SHIFT | Qt::Key_F1),
+                      tr("How the window is worked with"));
     about = make(tr("&About Cornerwright"), QKeySequence(),
                  tr("What this program is, and its cautions"));
     about->setMenuRole(QAction::AboutRole);

@@ -17,6 +17,7 @@ class WindowActions : public QObject {
     QAction* open;
     QAction* save;
     QAction* saveAs;
+    QAction* printPane;
     QAction* addMeasurements;
     QAction* quit;
 
@@ -30,16 +31,22 @@ class WindowActions : public QObject {
     QAction* hertz; ///< checkable: Hz rather than rad/s
     QAction* nextCase;
     QAction* previousCase;
-    QActionGroup* grounds; ///< system, light, dark; each carries its Ground as data
+    QAction* onlyShownCase;
+    QAction* everyCase;
+    QActionGroup* languageChoices; ///< system, English, German; each carries its code as data
+    QActionGroup* grounds;         ///< system, light, dark; each carries its Ground as data
     QAction* wholePane;
     QAction* allPanes;
 
     QAction* keepTrial;
     QAction* showTrials;
     QAction* place;
+    QAction* fitModel;
     QAction* showHandover;
     QAction* writeReport;
 
+    QAction* explain;
+    QAction* windowHelp;
     QAction* about;
 
     /// Enables and names undo and redo.
@@ -47,6 +54,11 @@ class WindowActions : public QObject {
     void setRedo(bool can, const QString& what);
 
   private:
+    void makeFileActions();
+    void makeEditActions();
+    void makeViewActions();
+    void makeDesignActions();
+    void makeHelpActions();
     QAction* make(const QString& text, const QKeySequence& keys, const QString& tip);
 
     QWidget* window_;

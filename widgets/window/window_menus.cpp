@@ -2,6 +2,7 @@
 
 #include "widgets/chain/chain_panel.h"
 #include "widgets/ledger/ledger_panel.h"
+#include "widgets/window/design_commands.h"
 #include "widgets/window/file_flow.h"
 #include "widgets/window/main_window.h"
 #include "widgets/window/window_actions.h"
@@ -22,6 +23,16 @@ void fillRecent(QMenu& menu, MainWindow& window) {
         action->setToolTip(path);
     }
     menu.setEnabled(!menu.isEmpty());
+}
+
+/// The commands of every pane that is in sight: copy, save, print and what it can show.
+void fillPanes(QMenu& menu, const WorkArea& area) {
+    menu.clear();
+    for (const auto& [key, pane] : area.panes()) {
+        if (area.isShown(key) && !pane->actions().isEmpty()) {
+            menu.addMenu(pane->title())->addActions(pane->actions());
+        }
+    }
 }
 
 /// "Lower centre" with every pane in it, and so on.
@@ -55,7 +66,7 @@ void fillMenus(MainWindow& window) {
                      [recent, &window] { fillRecent(*recent, window); });
     file->addActions({actions.save, actions.saveAs});
     file->addSeparator();
-    file->addAction(actions.addMeasurements);
+    file->addActions({actions.addMeasurements, actions.printPane});
     file->addSeparator();
     file->addAction(actions.quit);
 
@@ -69,21 +80,31 @@ void fillMenus(MainWindow& window) {
     edit->addMenu(window.ledger().addMenu());
 
     QMenu* view = bar->addMenu(MainWindow::tr("&View"));
-    view->addActions({actions.hertz, actions.previousCase, actions.nextCase});
-    view->addSeparator();
-    view->addActions(actions.grounds->actions());
+    view->addActions({actions.hertz, actions.previousCase, actions.nextCase, actions.onlyShownCase,
+                      actions.everyCase});
     view->addSeparator();
     addPlaces(*view, window.area());
     view->addActions({actions.wholePane, actions.allPanes});
+    view->addSeparator();
+    view->addActions(actions.grounds->actions());
+    view->addMenu(MainWindow::tr("Langua&ge"))->addActions(actions.languageChoices->actions());
+
+    QMenu* panes = bar->addMenu(MainWindow::tr("&Panes"));
+    QObject::connect(panes, &QMenu::aboutToShow, panes,
+                     [panes, &window] { fillPanes(*panes, window.area()); });
+    fillPanes(*panes, window.area());
 
     QMenu* design = bar->addMenu(MainWindow::tr("&Design"));
-    design->addAction(actions.place);
+    design->addActions({actions.place, actions.fitModel});
+    window.designCommands().addTo(*design);
     design->addSeparator();
     design->addActions({actions.keepTrial, actions.showTrials});
     design->addSeparator();
     design->addActions({actions.showHandover, actions.writeReport});
 
     QMenu* help = bar->addMenu(MainWindow::tr("&Help"));
+    help->addActions({actions.explain, actions.windowHelp});
+    help->addSeparator();
     help->addAction(actions.about);
 }
 
