@@ -7,6 +7,7 @@
 #include "widgets/handover/handover_flow.h"
 #include "widgets/ledger/ledger_model.h"
 #include "widgets/ledger/ledger_panel.h"
+#include "widgets/panes/plot_pane.h"
 #include "widgets/parts/quantity_field.h"
 #include "widgets/placement/placement_run.h"
 #include "widgets/theme.h"
@@ -24,6 +25,8 @@
 #include <QComboBox>
 #include <QFileInfo>
 #include <QLineEdit>
+#include <QMenuBar>
+#include <QPrinter>
 #include <QSignalSpy>
 #include <QTableView>
 #include <QTemporaryDir>
@@ -299,33 +302,6 @@ TEST_F(WindowTest, TheGroundChangesUnderARunningWindow) {
     applyAppearance(Ground::light);
 }
 
-TEST_F(WindowTest, DroppedMeasurementsBecomeCasesAndABadOneIsTold) {
-    const auto write = [this](const QString& name, const QByteArray& text) {
-        QFile file(folder.filePath(name));
-        EXPECT_TRUE(file.open(QIODevice::WriteOnly));
-        file.write(text);
-        return file.fileName();
-    };
-    const QByteArray good = "frequency (Hz),magnitude (dB),phase (deg)\n"
-                            "1,20,-95\n2,14,-100\n5,5,-110\n10,-2,-125\n20,-10,-140\n";
-    const QString first = write(QStringLiteral("unit 7.csv"), good);
-    const QString bad = write(QStringLiteral("unit 8.csv"), "frequency (Hz),magnitude (dB)\n1,x\n");
-    window.files().take({first, first, bad});
-    const std::vector<PlantCase>& cases = window.document().project().plant_cases;
-    ASSERT_EQ(cases.size(), 5u);
-    EXPECT_EQ(cases[3].name, "unit 7");
-    EXPECT_EQ(cases[4].name, "unit 7 2");
-    const auto& source = std::get<MeasurementSource>(cases[3].source);
-    EXPECT_EQ(source.response->w_rad_s.size(), 5u);
-    EXPECT_EQ(source.sha256.size(), 64u);
-    ASSERT_FALSE(window.notices().texts().isEmpty());
-    EXPECT_TRUE(window.notices().texts().first().contains(QStringLiteral("unit 8.csv")));
-    settle();
-    // All files that were dropped together are one step.
-    window.actions().undo->trigger();
-    EXPECT_EQ(window.document().project(), smallProject());
-}
-
 TEST_F(WindowTest, CasesAreAddedByFormulaHiddenAndRemoved) {
     QCheckBox* box = window.cases().rows().at(1)->checkBox();
     box->click();
@@ -334,6 +310,57 @@ TEST_F(WindowTest, CasesAreAddedByFormulaHiddenAndRemoved) {
     EXPECT_EQ(window.document().project().plant_cases.size(), 2u);
     window.actions().undo->trigger();
     EXPECT_EQ(window.document().project(), smallProject());
+}
+
+TEST_F(WindowTest, OneCaseOrEveryCaseIsDrawn) {
+    window.actions().nextCase->trigger();
+    window.actions().onlyShownCase->trigger();
+    EXPECT_EQ(window.viewState().hiddenCases(), (std::set<std::size_t>{0, 2}));
+    window.actions().everyCase->trigger();
+    EXPECT_TRUE(window.viewState().hiddenCases().empty());
+}
+
+TEST_F(WindowTest, TheLayoutIsKeptWithoutAnEndInOrder) {
+    window.area().show(QStringLiteral("nichols"), WorkArea::lower_right);
+    const QString file = folder.filePath(QStringLiteral("window.ini"));
+    ASSERT_TRUE(QTest::qWaitFor([&] {
+        return QSettings(file, QSettings::IniFormat).value(QStringLiteral("places/3")) ==
+               QStringLiteral("nichols");
+    }));
+    MainWindow next({file, folder.filePath(QStringLiteral("other"))});
+    EXPECT_TRUE(next.area().isShown(QStringLiteral("nichols")));
+}
+
+TEST_F(WindowTest, APaneIsPrintedOnAPage) {
+    const QString file = folder.filePath(QStringLiteral("magnitude.pdf"));
+    QPrinter printer;
+    printer.setOutputFormat(QPrinter::PdfFormat);
+    printer.setOutputFileName(file);
+    auto* pane = qobject_cast<PlotPane*>(window.area().pane(QStringLiteral("magnitude")));
+    EXPECT_TRUE(pane->print(printer));
+    QFile page(file);
+    ASSERT_TRUE(page.open(QIODevice::ReadOnly));
+    EXPECT_TRUE(page.readAll().startsWith("%PDF"));
+}
+
+TEST_F(WindowTest, EveryPaneInSightOffersItsCommandsInTheMenu) {
+    const auto menuOf = [this](const QString& pane) -> const QMenu* {
+        for (const QAction* top : window.menuBar()->actions()) {
+            for (const QAction* entry : top->menu()->actions()) {
+                if (entry->menu() != nullptr && entry->text() == pane) {
+                    return entry->menu();
+                }
+            }
+        }
+        return nullptr;
+    };
+    for (const auto& [key, pane] : window.area().panes()) {
+        if (window.area().isShown(key)) {
+            const QMenu* menu = menuOf(pane->title());
+            ASSERT_NE(menu, nullptr) << key.toStdString();
+            EXPECT_EQ(menu->actions(), pane->actions());
+        }
+    }
 }
 
 } // namespace
