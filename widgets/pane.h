@@ -52,6 +52,8 @@ class Pane : public QWidget {
     void dragCancelled();
     /// One edit without a drag (arrow key, delete, context menu), one undo step.
     void edited(const std::shared_ptr<const cornerwright::Project>& proposed, const QString& what);
+    /// Something the pane was asked for did not work; a sentence for the user.
+    void failed(const QString& why);
 
   protected:
     ViewState& viewState() const { return viewState_; }

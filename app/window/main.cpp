@@ -1,14 +1,18 @@
 #include "app/window/demo_place.h"
 #include "app/window/frame_times.h"
 #include "app/window/picture.h"
+#include "app/window/report_file.h"
 #include "app/window/test_report.h"
 #include "widgets/window/appearance.h"
 #include "widgets/window/file_flow.h"
+#include "widgets/window/language.h"
 #include "widgets/window/main_window.h"
 
 #include <QApplication>
 #include <QCommandLineParser>
 #include <QDir>
+#include <QIcon>
+#include <QSettings>
 #include <QStandardPaths>
 
 #include <cstdio>
@@ -37,6 +41,19 @@ struct Options {
     QCommandLineOption light{
         QStringLiteral("light"),
         QCoreApplication::translate("main", "Light ground, whatever the system says.")};
+    QCommandLineOption language{
+        QStringLiteral("language"),
+        QCoreApplication::translate("main", "Language of the window, en or de."),
+        QStringLiteral("CODE")};
+    QCommandLineOption report{
+        QStringLiteral("report"),
+        QCoreApplication::translate(
+            "main", "Write the review report of the one project as PDF to FILE and leave."),
+        QStringLiteral("FILE")};
+    QCommandLineOption reportDate{
+        QStringLiteral("report-date"),
+        QCoreApplication::translate("main", "A date to print in the report."),
+        QStringLiteral("DATE")};
     QCommandLineOption demo{QStringLiteral("demo"),
                             QCoreApplication::translate("main", "Open the first demo project.")};
     QCommandLineOption testReport{
@@ -81,8 +98,10 @@ void openFirst(MainWindow& window, const QStringList& files, bool demo) {
 
 int main(int argc, char** argv) {
     for (int i = 1; i < argc; ++i) {
-        if (std::strncmp(argv[i], "--picture", std::strlen("--picture")) == 0) {
-            qputenv("QT_QPA_PLATFORM", "offscreen"); // needs no screen, and shows nothing on one
+        for (const char* windowless : {"--picture", "--report"}) {
+            if (std::strncmp(argv[i], windowless, std::strlen(windowless)) == 0) {
+                qputenv("QT_QPA_PLATFORM", "offscreen"); // needs no screen, shows nothing on one
+            }
         }
     }
     QApplication application(argc, argv);
@@ -90,21 +109,37 @@ int main(int argc, char** argv) {
     QApplication::setApplicationDisplayName(QStringLiteral("Cornerwright"));
     QApplication::setApplicationVersion(QStringLiteral(CORNERWRIGHT_VERSION));
 
+    QApplication::setDesktopFileName(QStringLiteral("cornerwright"));
+    QApplication::setWindowIcon(QIcon(QStringLiteral(":/icons/cornerwright.svg")));
+    applyLanguage(
+        rememberedLanguage(QSettings(placesFor(false).settingsFile, QSettings::IniFormat)));
+
     const Options options;
     QCommandLineParser parser;
     parser.setApplicationDescription(QCoreApplication::translate(
         "main", "A workbench for closing feedback loops on real equipment."));
     parser.addHelpOption();
     parser.addVersionOption();
-    parser.addOptions({options.picture, options.size, options.dark, options.light, options.demo,
-                       options.testReport});
+    parser.addOptions({options.picture, options.size, options.dark, options.light, options.language,
+                       options.demo, options.report, options.reportDate, options.testReport});
     parser.addPositionalArgument(
         QStringLiteral("file"),
         QCoreApplication::translate("main", "A project or measurement file."),
         QStringLiteral("[file...]"));
     parser.process(application);
 
+    if (parser.isSet(options.report)) {
+        if (parser.positionalArguments().size() != 1) {
+            std::fputs("cornerwright: expected one project to report on\n", stderr);
+            return exitWrongUsage;
+        }
+        return writeReportFile(parser.positionalArguments().front(), parser.value(options.report),
+                               parser.value(options.reportDate));
+    }
     const bool picture = parser.isSet(options.picture);
+    if (picture || parser.isSet(options.language)) {
+        applyLanguage(parser.value(options.language));
+    }
     MainWindow window(placesFor(picture));
     applyAppearance(parser.isSet(options.dark)    ? Ground::dark
                     : parser.isSet(options.light) ? Ground::light

@@ -64,6 +64,16 @@ class Window:
             time.sleep(0.05)
         sys.exit(f"no sign of {what} within {PATIENCE:g} s")
 
+    def settle(self):
+        """Waits until nothing is computed and the report has come to rest; returns it."""
+        time.sleep(0.15)  # the report is written 50 ms after the last change
+        return self.wait("rest", lambda r: not r["busy"] or r["dialog"])
+
+    def to_panes(self):
+        """Back to all panes, whatever page or pane took the window."""
+        self.screen.hand("key", "Escape")
+        self.screen.hand("key", "shift+F11")
+
     def close(self):
         self.process.terminate()
         self.process.wait()

@@ -3,16 +3,23 @@
 #include "widgets/cases/case_edits.h"
 #include "widgets/chain/chain_edits.h"
 #include "widgets/chain/chain_panel.h"
+#include "widgets/ledger/ledger_model.h"
 #include "widgets/ledger/ledger_panel.h"
+#include "widgets/panes/plot_pane.h"
+#include "widgets/placement/placement_run.h"
 #include "widgets/trials/trial_book.h"
+#include "widgets/window/file_flow.h"
 #include "widgets/window/main_window.h"
 #include "widgets/window/pane_slot.h"
 #include "widgets/window/window_actions.h"
 #include "widgets/window/work_area.h"
 
 #include <QDir>
+#include <QMouseEvent>
 #include <QSignalSpy>
+#include <QTableView>
 #include <QTemporaryDir>
+#include <QTest>
 #include <gtest/gtest.h>
 
 #include <random>
@@ -28,7 +35,7 @@ class RandomHand {
     RandomHand(MainWindow& window, unsigned seed) : window_(window), random_(seed) {}
 
     void act() {
-        switch (below(14)) {
+        switch (below(22)) {
         case 0:
             return add();
         case 1:
@@ -54,8 +61,22 @@ class RandomHand {
             return window_.actions().hertz->toggle();
         case 12:
             return showPane();
-        default:
+        case 13:
             return trial();
+        case 14:
+        case 15:
+            return mouseOnPane();
+        case 16:
+        case 17:
+            return keyOnPane();
+        case 18:
+            return editRequirements();
+        case 19:
+            return look();
+        case 20:
+            return placeAndStop();
+        default:
+            return saveAndReopen();
         }
     }
 
@@ -131,9 +152,110 @@ class RandomHand {
         }
     }
 
+    PlotPane* anyPane() {
+        const auto place = static_cast<WorkArea::Place>(below(WorkArea::placeCount_));
+        auto* pane = qobject_cast<PlotPane*>(window_.area().slotAt(place)->pane());
+        return pane != nullptr && pane->isVisible() ? pane : nullptr;
+    }
+
+    /// A press, moves and a release anywhere, half of them on a handle; Escape now and then.
+    void mouseOnPane() {
+        PlotPane* pane = anyPane();
+        if (pane == nullptr) {
+            return;
+        }
+        QWidget* plot = pane->plotWidget();
+        const auto anywhere = [&] {
+            return QPoint(static_cast<int>(below(static_cast<std::size_t>(plot->width()))),
+                          static_cast<int>(below(static_cast<std::size_t>(plot->height()))));
+        };
+        const std::vector<Handle> handles = pane->handles();
+        const bool onHandle = !handles.empty() && below(2) == 0;
+        const QPoint start = onHandle ? handles[below(handles.size())].at.toPoint() : anywhere();
+        const Qt::KeyboardModifiers keys[] = {Qt::NoModifier, Qt::ShiftModifier,
+                                              Qt::ControlModifier};
+        const Qt::KeyboardModifiers key = keys[below(3)];
+        QTest::mousePress(plot, Qt::LeftButton, key, start);
+        for (std::size_t i = below(5); i > 0; --i) {
+            const QPointF to = onHandle && below(3) > 0
+                                   ? QPointF(start) + QPointF(20.0 * factor(), -15.0 * factor())
+                                   : QPointF(anywhere());
+            QMouseEvent move(QEvent::MouseMove, to, plot->mapToGlobal(to), Qt::NoButton,
+                             Qt::LeftButton, key);
+            QCoreApplication::sendEvent(plot, &move);
+            QCoreApplication::processEvents();
+        }
+        if (below(4) == 0) {
+            QTest::keyClick(pane, Qt::Key_Escape);
+        }
+        QTest::mouseRelease(plot, Qt::LeftButton, key, anywhere());
+    }
+
+    void keyOnPane() {
+        constexpr Qt::Key keys[] = {Qt::Key_Tab,  Qt::Key_Left, Qt::Key_Right, Qt::Key_Up,
+                                    Qt::Key_Down, Qt::Key_Home, Qt::Key_Space, Qt::Key_Delete};
+        if (PlotPane* pane = anyPane()) {
+            QTest::keyClick(pane, keys[below(std::size(keys))]);
+        }
+    }
+
+    void editRequirements() {
+        const std::size_t count = project().requirements.size();
+        if (count < 12 && below(2) == 0) {
+            window_.ledger().add(all_measures()[below(all_measures().size())]);
+        } else if (window_.ledger().model()->rowCount() > 0) {
+            constexpr Qt::Key keys[] = {Qt::Key_Down, Qt::Key_Space, Qt::Key_Return, Qt::Key_F1,
+                                        Qt::Key_Delete};
+            window_.ledger().view()->selectRow(0);
+            QTest::keyClick(window_.ledger().view(), keys[below(std::size(keys))]);
+        }
+    }
+
+    void look() {
+        QAction* const actions[] = {window_.actions().onlyShownCase, window_.actions().everyCase,
+                                    window_.actions().explain,       window_.actions().wholePane,
+                                    window_.actions().allPanes,      window_.actions().about,
+                                    window_.actions().showHandover,  window_.actions().showTrials};
+        actions[below(std::size(actions))]->trigger();
+        if (below(20) == 0) {
+            const QList<QAction*> grounds = window_.actions().grounds->actions();
+            grounds[static_cast<qsizetype>(below(3))]->trigger();
+        }
+    }
+
+    void placeAndStop() {
+        if (below(10) == 0) {
+            window_.actions().place->trigger();
+            QCoreApplication::processEvents();
+            window_.placement().cancel();
+        }
+    }
+
+    void saveAndReopen() {
+        if (below(4) != 0) {
+            return;
+        }
+        const QString path = folder_.filePath(QStringLiteral("stress.cornerwright.json"));
+        ASSERT_TRUE(window_.files().saveTo(path));
+        if (below(2) == 0) {
+            const Project saved = project();
+            window_.files().open(path);
+            ASSERT_EQ(project(), saved);
+        }
+    }
+
     MainWindow& window_;
     std::mt19937 random_;
+    QTemporaryDir folder_;
 };
+
+/// How long the hand works: short in the everyday run, as long as wished when asked for.
+int actionCount() {
+    constexpr int everyday = 200;
+    bool given = false;
+    const int wished = qEnvironmentVariableIntValue("CORNERWRIGHT_STRESS_ACTIONS", &given);
+    return given ? wished : everyday;
+}
 
 TEST(Window, WithstandsAHandThatDoesAnythingAndShowsWhatAFreshEngineSays) {
     const QTemporaryDir folder;
@@ -143,7 +265,7 @@ TEST(Window, WithstandsAHandThatDoesAnythingAndShowsWhatAFreshEngineSays) {
     window.show();
     constexpr unsigned seed = 5;
     RandomHand hand(window, seed);
-    constexpr int actions = 160;
+    const int actions = actionCount();
     constexpr int checkEvery = 40;
     QSignalSpy changed(&window.live(), &LiveContent::contentChanged);
     for (int i = 1; i <= actions; ++i) {

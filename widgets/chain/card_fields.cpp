@@ -13,7 +13,7 @@ namespace cornerwright {
 namespace {
 
 QString tr(const char* text) {
-    return QCoreApplication::translate("SectionCard", text);
+    return QCoreApplication::translate("cornerwright", text);
 }
 
 QuantityKind quantityOf(const SectionParameter& parameter) {

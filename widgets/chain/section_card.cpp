@@ -1,6 +1,7 @@
 #include "widgets/chain/section_card.h"
 
 #include "widgets/figure_text.h"
+#include "widgets/help/help_topic.h"
 #include "widgets/parts/glyph_button.h"
 #include "widgets/parts/quantity_field.h"
 #include "widgets/parts/text_label.h"
@@ -24,6 +25,8 @@ constexpr double cornerRadius = 4.0;
 SectionCard::SectionCard(std::size_t index, const Section& section, QWidget* parent)
     : QFrame(parent), index_(index), section_(section), cardFields_(cardFieldsOf(section.kind)) {
     setFocusPolicy(Qt::StrongFocus);
+    const std::string_view kind = name_of(section.kind);
+    setHelpTopic(*this, QString::fromUtf8(kind.data(), std::ssize(kind)));
     build();
     refresh();
 }

@@ -16,7 +16,8 @@ namespace cornerwright {
 
 namespace {
 
-constexpr std::chrono::milliseconds editAge{1000};
+// Well below the second that is promised, so that a slow disk still keeps it.
+constexpr std::chrono::milliseconds editAge{500};
 const QString copySuffix = QStringLiteral(".recovery.json");
 const QString originSuffix = QStringLiteral(".origin");
 const QString lockSuffix = QStringLiteral(".lock");

@@ -22,7 +22,7 @@ struct RecoverableProject {
     QDateTime savedAt;
 };
 
-/// Writes a copy of the modified project once an edit is a second old, and takes it away when the
+/// Writes a copy of the modified project before an edit is a second old, and takes it away when the
 /// file is saved or the program ends in order. A lock file beside the copy tells whether the run
 /// that wrote it is still alive.
 class RecoveryCopy : public QObject {

@@ -2,10 +2,12 @@
 
 #include "widgets/document/document.h"
 #include "widgets/figure_text.h"
+#include "widgets/help/help_topic.h"
 #include "widgets/ledger/ledger_delegate.h"
 #include "widgets/ledger/ledger_model.h"
 #include "widgets/ledger/requirement_editor.h"
 #include "widgets/ledger/requirement_edits.h"
+#include "widgets/parts/glyph_button.h"
 #include "widgets/parts/link_button.h"
 #include "widgets/theme.h"
 #include "widgets/view_state.h"
@@ -41,6 +43,10 @@ LedgerPanel::LedgerPanel(Document& document, ViewState& viewState, QWidget* pare
         addMenu_->popup(addButton->mapToGlobal(QPoint(0, addButton->height())));
     });
     addToHead(addButton);
+    auto* help = new GlyphButton(Glyph::help, tr("What is the selected requirement?"), this);
+    addToHead(help);
+    connect(help, &GlyphButton::clicked, this, [this] { Q_EMIT helpAsked(helpTopicOf(view_)); });
+    setHelpTopic(*this, QStringLiteral("verdict"));
     buildView();
     body()->addWidget(view_, 1);
     body()->addWidget(editor_);
@@ -92,6 +98,42 @@ void LedgerPanel::buildView() {
             [this](const QModelIndex& index) { goToWorst(index.row()); });
     connect(view_, &QTableView::doubleClicked, this,
             [this](const QModelIndex& index) { edit(model_->requirementOf(index.row())); });
+    connect(view_->selectionModel(), &QItemSelectionModel::currentRowChanged, this,
+            &LedgerPanel::followTopic);
+    connect(model_, &QAbstractItemModel::layoutChanged, this, &LedgerPanel::followTopic);
+    connect(model_, &QAbstractItemModel::modelReset, this, &LedgerPanel::followTopic);
+    view_->setContextMenuPolicy(Qt::CustomContextMenu);
+    connect(view_, &QWidget::customContextMenuRequested, this, &LedgerPanel::showRowMenu);
+}
+
+void LedgerPanel::followTopic() {
+    const QModelIndex row = view_->currentIndex();
+    const std::string_view measure =
+        row.isValid() ? name_of(model_->result(row.row()).requirement.measure) : "";
+    setHelpTopic(*view_, QString::fromUtf8(measure.data(), std::ssize(measure)));
+}
+
+void LedgerPanel::showRowMenu(const QPoint& at) {
+    const QModelIndex index = view_->indexAt(at);
+    if (!index.isValid()) {
+        return;
+    }
+    const std::size_t requirement = model_->requirementOf(index.row());
+    auto* menu = new QMenu(this);
+    menu->setAttribute(Qt::WA_DeleteOnClose);
+    menu->addAction(tr("Go to the worst\tSpace"), this, [this, requirement] {
+        if (const int row = model_->rowOf(requirement); row >= 0) {
+            goToWorst(row);
+        }
+    });
+    menu->addAction(tr("Change the limit\tEnter"), this,
+                    [this, requirement] { edit(requirement); });
+    menu->addAction(tr("Remove\tDel"), this,
+                    [this, requirement] { removeRequirement(requirement); });
+    menu->addSeparator();
+    menu->addAction(tr("What is this?\tF1"), this,
+                    [this] { Q_EMIT helpAsked(helpTopicOf(view_)); });
+    menu->popup(view_->viewport()->mapToGlobal(at));
 }
 
 void LedgerPanel::fitColumns() {
@@ -186,6 +228,9 @@ void LedgerPanel::endEditing() {
 
 void LedgerPanel::removeRequirement(std::size_t requirement) {
     endEditing();
+    if (requirement >= document_.project().requirements.size()) {
+        return; // gone while its menu stood open
+    }
     const QString name = measureText(document_.project().requirements.at(requirement).measure);
     document_.apply(withRequirementRemoved(document_.project(), requirement),
                     tr("Remove %1").arg(name));

@@ -35,6 +35,10 @@ class LedgerPanel : public PanelFrame {
     QTableView* view() const { return view_; }
     LedgerModel* model() const { return model_; }
 
+  Q_SIGNALS:
+    /// A person wants to know what a topic of the help texts is.
+    void helpAsked(const QString& topic);
+
   protected:
     bool eventFilter(QObject* watched, QEvent* event) override;
     void changeEvent(QEvent* event) override;
@@ -43,6 +47,8 @@ class LedgerPanel : public PanelFrame {
     void buildView();
     void fitColumns();
     void dressHeader();
+    void followTopic();
+    void showRowMenu(const QPoint& at);
     void edit(std::size_t requirement);
     void endEditing();
     void removeRequirement(std::size_t requirement);

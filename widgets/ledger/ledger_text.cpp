@@ -14,7 +14,7 @@ namespace cornerwright {
 namespace {
 
 QString tr(const char* text) {
-    return QCoreApplication::translate("Ledger", text);
+    return QCoreApplication::translate("cornerwright", text);
 }
 
 /// Distance to the nearer limit in the measure's unit, positive inside. Margins count by size.

@@ -7,7 +7,7 @@ namespace cornerwright {
 namespace {
 
 QString tr(const char* text) {
-    return QCoreApplication::translate("Ledger", text);
+    return QCoreApplication::translate("cornerwright", text);
 }
 
 bool isRatioScale(MeasureUnit unit) {

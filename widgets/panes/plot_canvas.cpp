@@ -4,6 +4,7 @@
 #include <QSvgGenerator>
 #include <qcustomplot.h>
 
+#include <algorithm>
 #include <utility>
 
 namespace cornerwright {
@@ -184,6 +185,19 @@ bool PlotCanvas::saveVector(const QString& file, bool svg) {
         return false;
     painter.setMode(QCPPainter::pmVectorized);
     painter.setMode(QCPPainter::pmNoCaching);
+    plot_->toPainter(&painter, plot_->width(), plot_->height());
+    return painter.end();
+}
+
+bool PlotCanvas::print(QPaintDevice& page) {
+    QCPPainter painter;
+    if (!painter.begin(&page))
+        return false;
+    painter.setMode(QCPPainter::pmVectorized);
+    painter.setMode(QCPPainter::pmNoCaching);
+    const double scale = std::min(static_cast<double>(page.width()) / plot_->width(),
+                                  static_cast<double>(page.height()) / plot_->height());
+    painter.scale(scale, scale);
     plot_->toPainter(&painter, plot_->width(), plot_->height());
     return painter.end();
 }

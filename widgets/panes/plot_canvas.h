@@ -9,6 +9,7 @@
 #include <vector>
 
 class QCustomPlot;
+class QPaintDevice;
 class QPainter;
 class QWidget;
 
@@ -54,6 +55,8 @@ class PlotCanvas {
     /// Pictures have white ground; the caller sets the light theme before and its own after.
     QImage picture(double scale);
     bool saveVector(const QString& file, bool svg);
+    /// Onto a page, as large as it allows. False where nothing can be painted on it.
+    bool print(QPaintDevice& page);
 
   private:
     void layOut();

@@ -11,6 +11,7 @@
 
 class QMenu;
 class QMouseEvent;
+class QPrinter;
 class QWheelEvent;
 
 namespace cornerwright {
@@ -40,6 +41,9 @@ class PlotPane : public Pane {
     QImage picture(double scale = 2.0);
     /// PNG, PDF or SVG by the suffix. False where the file could not be written.
     bool savePicture(const QString& file);
+    /// The same on paper, as large as the page allows. False where nothing could be printed.
+    bool print(QPrinter& printer);
+    void askAndPrint();
     /// What the pane shows as comma-separated values, units in the header.
     virtual QString csv() const = 0;
 

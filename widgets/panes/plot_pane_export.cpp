@@ -8,19 +8,11 @@
 #include <QFileDialog>
 #include <QFileInfo>
 #include <QGuiApplication>
-#include <QMessageBox>
+#include <QPrintDialog>
+#include <QPrinter>
 #include <QSaveFile>
 
 namespace cornerwright {
-
-namespace {
-
-void tellNotSaved(QWidget* parent, const QString& file) {
-    QMessageBox::warning(parent, PlotPane::tr("Not saved"),
-                         PlotPane::tr("%1 could not be written.").arg(file));
-}
-
-} // namespace
 
 QAction* PlotPane::addPaneAction(const QString& text, const std::function<void()>& run) {
     auto* action = new QAction(text, this);
@@ -36,6 +28,7 @@ void PlotPane::addExportActions() {
     addPaneAction(tr("Copy as picture"), [this] { copyPicture(); });
     addPaneAction(tr("Save picture …"), [this] { askAndSavePicture(); });
     addPaneAction(tr("Save data as CSV …"), [this] { askAndSaveData(); });
+    addPaneAction(tr("Print …"), [this] { askAndPrint(); });
 }
 
 QImage PlotPane::picture(double scale) {
@@ -62,6 +55,26 @@ bool PlotPane::savePicture(const QString& file) {
     return saved;
 }
 
+bool PlotPane::print(QPrinter& printer) {
+    exporting_ = true;
+    canvas_.setTheme(theme());
+    const bool printed = canvas_.print(printer);
+    exporting_ = false;
+    canvas_.setTheme(theme());
+    redraw();
+    return printed;
+}
+
+void PlotPane::askAndPrint() {
+    QPrinter printer(QPrinter::HighResolution);
+    printer.setPageOrientation(QPageLayout::Landscape);
+    printer.setDocName(title());
+    QPrintDialog dialog(&printer, this);
+    dialog.setWindowTitle(tr("Print %1").arg(title()));
+    if (dialog.exec() == QDialog::Accepted && !print(printer))
+        Q_EMIT failed(tr("%1 could not be printed.").arg(title()));
+}
+
 void PlotPane::copyPicture() {
     QGuiApplication::clipboard()->setImage(picture());
 }
@@ -71,7 +84,7 @@ void PlotPane::askAndSavePicture() {
                                                       title().toLower() + QStringLiteral(".pdf"),
                                                       tr("PDF (*.pdf);;SVG (*.svg);;PNG (*.png)"));
     if (!file.isEmpty() && !savePicture(file))
-        tellNotSaved(this, file);
+        Q_EMIT failed(tr("%1 could not be written.").arg(file));
 }
 
 void PlotPane::askAndSaveData() {
@@ -85,7 +98,7 @@ void PlotPane::askAndSaveData() {
     const bool saved =
         target.open(QIODevice::WriteOnly) && target.write(text) == text.size() && target.commit();
     if (!saved)
-        tellNotSaved(this, file);
+        Q_EMIT failed(tr("%1 could not be written.").arg(file));
 }
 
 } // namespace cornerwright

@@ -92,6 +92,15 @@ void paintGlyph(QPainter& painter, Glyph glyph, const QRectF& box, const QColor&
         painter.drawPolygon(QPolygonF({QPointF(4.0, 12.0), QPointF(4.6, 9.6), QPointF(10.6, 3.6),
                                        QPointF(12.4, 5.4), QPointF(6.4, 11.4)}));
         break;
+    case Glyph::help: {
+        QPainterPath hook;
+        hook.moveTo(5.2, 6.2);
+        hook.cubicTo(5.2, 2.2, 11.2, 2.4, 10.8, 6.0);
+        hook.cubicTo(10.6, 7.8, 8.0, 7.8, 8.0, 10.2);
+        painter.drawPath(hook);
+        painter.fillRect(QRectF(7.3, 12.0, 1.4, 1.4), colour);
+        break;
+    }
     }
     painter.restore();
 }

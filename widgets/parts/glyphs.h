@@ -21,6 +21,7 @@ enum class Glyph {
     up,
     down,
     edit,
+    help,
 };
 
 void paintGlyph(QPainter& painter, Glyph glyph, const QRectF& box, const QColor& colour);

@@ -58,7 +58,7 @@ constexpr std::array<Prefix, 9> prefixes{{{u"", 1.0},
                                           {u"G", 1e9}}};
 
 QString tr(const char* text) {
-    return QCoreApplication::translate("Quantity", text);
+    return QCoreApplication::translate("cornerwright", text);
 }
 
 std::span<const Unit> unitsOf(QuantityKind kind) {

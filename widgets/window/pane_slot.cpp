@@ -19,6 +19,7 @@ constexpr double cornerRadius = 5.0;
 PaneSlot::PaneSlot(bool canSwitch, QWidget* parent)
     : QFrame(parent),
       name_(new QToolButton(this)),
+      help_(new GlyphButton(Glyph::help, tr("What is this?"), this)),
       whole_(new GlyphButton(Glyph::whole_window, tr("Take the whole window"), this)),
       head_(new QHBoxLayout),
       body_(new QVBoxLayout) {
@@ -29,6 +30,7 @@ PaneSlot::PaneSlot(bool canSwitch, QWidget* parent)
     head_->setSpacing(6);
     head_->addWidget(name_);
     head_->addStretch(1);
+    head_->addWidget(help_);
     head_->addWidget(whole_);
     whole->addLayout(head_);
     whole->addLayout(body_, 1);
@@ -49,6 +51,7 @@ PaneSlot::PaneSlot(bool canSwitch, QWidget* parent)
         name_->setFocusPolicy(Qt::NoFocus);
         name_->setAttribute(Qt::WA_TransparentForMouseEvents);
     }
+    connect(help_, &GlyphButton::clicked, this, &PaneSlot::helpAsked);
     connect(whole_, &GlyphButton::clicked, this, &PaneSlot::wholeAsked);
 }
 
@@ -65,10 +68,11 @@ void PaneSlot::setPane(Pane* pane) {
     }
     name_->setText(menu_ != nullptr ? pane_->title() + QStringLiteral(" ▾") : pane_->title());
     name_->setAccessibleName(tr("Pane: %1").arg(pane_->title()));
+    help_->setAccessibleName(tr("%1: what is this?").arg(pane_->title()));
     whole_->setAccessibleName(tr("%1: take the whole window").arg(pane_->title()));
     headWidget_ = pane_->headWidget();
     if (headWidget_ != nullptr) {
-        head_->insertWidget(head_->count() - 1, headWidget_);
+        head_->insertWidget(head_->indexOf(help_), headWidget_);
         headWidget_->show();
     }
     body_->addWidget(pane_);

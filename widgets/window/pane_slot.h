@@ -34,6 +34,7 @@ class PaneSlot : public QFrame {
     /// The menu of panes is about to show: whoever owns the panes fills it.
     void menuAsked(QMenu* menu);
     void wholeAsked();
+    void helpAsked();
 
   protected:
     void paintEvent(QPaintEvent* event) override;
@@ -44,6 +45,7 @@ class PaneSlot : public QFrame {
     QWidget* headWidget_ = nullptr;
     QToolButton* name_;
     QMenu* menu_ = nullptr;
+    GlyphButton* help_;
     GlyphButton* whole_;
     QHBoxLayout* head_;
     QVBoxLayout* body_;

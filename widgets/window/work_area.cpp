@@ -1,5 +1,6 @@
 #include "widgets/window/work_area.h"
 
+#include "widgets/help/help_topic.h"
 #include "widgets/window/pane_slot.h"
 
 #include <QHBoxLayout>
@@ -53,8 +54,13 @@ WorkArea::WorkArea(QWidget* chain, QWidget* cases, QWidget* ledger, QWidget* par
             new PaneSlot(place != upper_centre, place <= lower_centre ? centre_ : side_);
         connect(slots_[place], &PaneSlot::menuAsked, this,
                 [this, place](QMenu* menu) { fillMenu(menu, place); });
+        connect(slots_[place], &PaneSlot::helpAsked, this,
+                [this, place] { Q_EMIT helpAsked(helpTopicOf(slots_[place]->pane())); });
         connect(slots_[place], &PaneSlot::wholeAsked, this,
                 [this, place] { setWhole(whole_ == slots_[place] ? nullptr : slots_[place]); });
+    }
+    for (const QSplitter* splitter : {columns_, left_, right_, panesRow_, centre_, side_}) {
+        connect(splitter, &QSplitter::splitterMoved, this, &WorkArea::layoutChanged);
     }
     columns_->setStretchFactor(0, 0);
     columns_->setStretchFactor(1, 1);
@@ -75,6 +81,7 @@ void WorkArea::showEvent(QShowEvent* event) {
 }
 
 void WorkArea::addPane(const QString& key, Pane* pane) {
+    setHelpTopic(*pane, QStringLiteral("pane-") + key);
     pane->hide();
     pane->setParent(this);
     panes_.emplace_back(key, pane);
@@ -111,6 +118,7 @@ void WorkArea::show(const QString& key, Place place) {
         (*other)->setPane(given);
     }
     wanted->setContent(content_);
+    Q_EMIT layoutChanged();
 }
 
 void WorkArea::reveal(const QString& key, Place fallback) {

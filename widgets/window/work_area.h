@@ -47,6 +47,12 @@ class WorkArea : public QWidget {
     void save(QSettings& settings) const;
     void restore(const QSettings& settings);
 
+  Q_SIGNALS:
+    /// A person wants to know what a topic of the help texts is.
+    void helpAsked(const QString& topic);
+    /// Splitters or the places of panes were changed by hand.
+    void layoutChanged();
+
   protected:
     void showEvent(QShowEvent* event) override;
 
