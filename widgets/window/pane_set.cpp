@@ -1,5 +1,8 @@
 #include "widgets/window/pane_set.h"
 
+#include "widgets/design/room_pane.h"
+#include "widgets/design/tolerance_pane.h"
+#include "widgets/fleet/fleet_pane.h"
 #include "widgets/handover/realisation_pane.h"
 #include "widgets/panes/magnitude_pane.h"
 #include "widgets/panes/nichols_pane.h"
@@ -26,6 +29,9 @@ void makePanes(WorkArea& area, ViewState& viewState, TrialBook& trials) {
     area.addPane(QStringLiteral("quality"), new QualityPane(viewState, &area));
     area.addPane(QStringLiteral("handover"), new RealisationPane(viewState, &area));
     area.addPane(QStringLiteral("trials"), new TrialsPane(viewState, trials, &area));
+    area.addPane(QStringLiteral("room"), new RoomPane(viewState, &area));
+    area.addPane(QStringLiteral("tolerance"), new TolerancePane(viewState, &area));
+    area.addPane(QStringLiteral("fleet"), new FleetPane(viewState, &area));
 }
 
 } // namespace cornerwright
