@@ -15,6 +15,9 @@ namespace cornerwright {
 /// (citation from memory).
 template <typename Function>
 double bracketed_root(Function&& f, double a, double fa, double b, double fb) {
+    // An end on the root itself has no sign for the bracket to go by.
+    if (fa == 0.0 || fb == 0.0)
+        return fa == 0.0 ? a : b;
     constexpr int most_steps = 120; // bisection alone needs 60 for a ratio of 2 between the ends
     double c = a;
     double fc = fa;
