@@ -11,10 +11,12 @@
 #include <QApplication>
 #include <QCommandLineParser>
 #include <QDir>
+#include <QHashSeed>
 #include <QIcon>
 #include <QSettings>
 #include <QStandardPaths>
 
+#include <algorithm>
 #include <cstdio>
 #include <cstring>
 
@@ -97,12 +99,17 @@ void openFirst(MainWindow& window, const QStringList& files, bool demo) {
 } // namespace
 
 int main(int argc, char** argv) {
-    for (int i = 1; i < argc; ++i) {
-        for (const char* windowless : {"--picture", "--report"}) {
-            if (std::strncmp(argv[i], windowless, std::strlen(windowless)) == 0) {
-                qputenv("QT_QPA_PLATFORM", "offscreen"); // needs no screen, shows nothing on one
-            }
-        }
+    const auto isGiven = [&](const char* option) {
+        return std::any_of(argv + 1, argv + argc, [option](const char* argument) {
+            return std::strncmp(argument, option, std::strlen(option)) == 0;
+        });
+    };
+    const bool reports = isGiven("--report");
+    if (reports || isGiven("--picture")) {
+        qputenv("QT_QPA_PLATFORM", "offscreen"); // needs no screen, and shows nothing on one
+    }
+    if (reports) {
+        QHashSeed::setDeterministicGlobalSeed(); // the same project gives the same bytes
     }
     QApplication application(argc, argv);
     QApplication::setApplicationName(QStringLiteral("cornerwright"));

@@ -1,6 +1,6 @@
 #include "widgets/handover/export_row.h"
 
-#include "core/handover/report.h"
+#include "core/handover/cautions.h"
 #include "widgets/parts/link_button.h"
 #include "widgets/parts/text_label.h"
 

@@ -4,6 +4,7 @@
 #include "core/numerics/error.h"
 #include "core/numerics/sha256.h"
 #include "core/numerics/write_file.h"
+#include "widgets/handover/report_document.h"
 
 #include <QFile>
 #include <QFileDialog>
@@ -57,13 +58,13 @@ void HandoverFlow::exportTo(HandoverForm form, const QString& name, const QStrin
 }
 
 void HandoverFlow::chooseAndReport() {
-    QString path =
-        QFileDialog::getSaveFileName(window_, tr("Write the review report"),
-                                     QFileInfo(projectFile_).absolutePath(), tr("HTML (*.html)"));
+    QString path = QFileDialog::getSaveFileName(window_, tr("Write the review report"),
+                                                QFileInfo(projectFile_).absolutePath(),
+                                                tr("HTML (*.html);;PDF (*.pdf)"));
     if (path.isEmpty()) {
         return;
     }
-    if (!path.endsWith(QStringLiteral(".html"))) {
+    if (QFileInfo(path).suffix().isEmpty()) {
         path += QStringLiteral(".html");
     }
     reportTo(path);
@@ -74,9 +75,10 @@ void HandoverFlow::reportTo(const QString& path) {
         return;
     }
     try {
-        const std::string html = report_html({content_.project.get(), content_.assessment.get(),
-                                              content_.locus.get(), projectHash(), std::string()});
-        write_file(toPath(path), html);
+        const ReportInput input{content_.project.get(), content_.assessment.get(),
+                                content_.locus.get(), projectHash(), std::string()};
+        const bool pdf = path.endsWith(QStringLiteral(".pdf"), Qt::CaseInsensitive);
+        write_file(toPath(path), pdf ? reportPdf(input).toStdString() : report_html(input));
         Q_EMIT done(tr("Report written to %1.").arg(path));
     } catch (const std::runtime_error& error) { // InputError, WriteError: sentences for the user
         Q_EMIT failed(QString::fromUtf8(error.what()));

@@ -1,6 +1,9 @@
 #include "widgets/handover/realisation_pane.h"
 
 #include "widgets/handover/export_row.h"
+#include "widgets/handover/limited_step_view.h"
+#include "widgets/handover/study_run.h"
+#include "widgets/handover/study_view.h"
 #include "widgets/parts/quantity_field.h"
 #include "widgets/parts/text_label.h"
 #include "widgets/view_state.h"
@@ -19,6 +22,7 @@ namespace cornerwright {
 namespace {
 
 constexpr double firstPeriod = 1e-3; // s, where the project did not sample before
+constexpr double firstLimit = 1.0;   // of the output, until the user says what the actuator can do
 
 template <typename Value>
 void choose(QComboBox& box, Value value) {
@@ -54,13 +58,24 @@ RealisationPane::RealisationPane(ViewState& viewState, QWidget* parent)
       format_(new QComboBox(this)),
       wordBits_(new QComboBox(this)),
       fractionBits_(new QuantityField(QuantityKind::count, this)),
+      limits_(new QCheckBox(this)),
+      lowest_(new QuantityField(QuantityKind::plain, this)),
+      highest_(new QuantityField(QuantityKind::plain, this)),
       outcome_(new TextLabel(QString(), TextLabel::Kind::muted, this)),
       problem_(new TextLabel(QString(), TextLabel::Kind::problem, this)),
-      exports_(new ExportRow(this)) {
+      exports_(new ExportRow(this)),
+      study_(new StudyView(this)),
+      limitedStep_(new LimitedStepView(this)),
+      limitedSentence_(new TextLabel(QString(), TextLabel::Kind::muted, this)),
+      run_(new StudyRun(this)) {
     build();
     connectFields();
-    connect(&viewState, &ViewState::unitChanged, this,
-            [this] { match_->setShowsHertz(this->viewState().showsHertz()); });
+    connectLimits();
+    connectStudy();
+    connect(&viewState, &ViewState::unitChanged, this, [this] {
+        match_->setShowsHertz(this->viewState().showsHertz());
+        study_->setShowsHertz(this->viewState().showsHertz());
+    });
     setFocusProxy(period_);
 }
 
@@ -76,19 +91,36 @@ void RealisationPane::addRow(QGridLayout& grid, const QString& label, QWidget* f
     grid.addWidget(field, row, 1);
 }
 
+void RealisationPane::buildFields(QGridLayout& grid) {
+    grid.setHorizontalSpacing(12);
+    grid.setVerticalSpacing(4);
+    const auto addWide = [&grid](QWidget* field) {
+        grid.addWidget(field, grid.rowCount(), 0, 1, 2);
+    };
+    addRow(grid, tr("Sample period or rate"), period_);
+    addRow(grid, tr("Computation delay"), delay_);
+    addWide(includesHold_);
+    addWide(realise_);
+    addRow(grid, tr("Method"), method_);
+    addRow(grid, tr("Exact at"), match_);
+    addRow(grid, tr("Structure"), structure_);
+    addRow(grid, tr("Number format"), format_);
+    addRow(grid, tr("Word length"), wordBits_);
+    addRow(grid, tr("Fraction bits"), fractionBits_);
+    addWide(limits_);
+    addRow(grid, tr("Lowest output"), lowest_);
+    addRow(grid, tr("Highest output"), highest_);
+    grid.setColumnStretch(1, 1);
+}
+
 void RealisationPane::build() {
     includesHold_->setText(tr("design loop counts hold and delay"));
     realise_->setText(tr("judge the difference equation"));
-    const std::pair<QString, Method> methods[] = {
-        {tr("Tustin"), Method::tustin},
-        {tr("Tustin, exact at each corner"), Method::tustin_at_corners},
-        {tr("Tustin, exact at one frequency"), Method::tustin_at},
-        {tr("matched roots"), Method::matched_roots},
-        {tr("step invariant"), Method::step_invariant},
-        {tr("ramp invariant"), Method::ramp_invariant},
-    };
-    for (const auto& [name, value] : methods) {
-        method_->addItem(name, static_cast<int>(value));
+    limits_->setText(tr("limit the output, with conditional integration"));
+    for (const Method method :
+         {Method::tustin, Method::tustin_at_corners, Method::tustin_at, Method::matched_roots,
+          Method::step_invariant, Method::ramp_invariant}) {
+        method_->addItem(methodText(method), static_cast<int>(method));
     }
     structure_->addItem(tr("direct form 1"), static_cast<int>(Structure::direct_form_1));
     structure_->addItem(tr("direct form 2 transposed"),
@@ -108,19 +140,7 @@ void RealisationPane::build() {
     }
 
     auto* grid = new QGridLayout;
-    grid->setHorizontalSpacing(12);
-    grid->setVerticalSpacing(4);
-    addRow(*grid, tr("Sample period or rate"), period_);
-    addRow(*grid, tr("Computation delay"), delay_);
-    grid->addWidget(includesHold_, grid->rowCount(), 0, 1, 2);
-    grid->addWidget(realise_, grid->rowCount(), 0, 1, 2);
-    addRow(*grid, tr("Method"), method_);
-    addRow(*grid, tr("Exact at"), match_);
-    addRow(*grid, tr("Structure"), structure_);
-    addRow(*grid, tr("Number format"), format_);
-    addRow(*grid, tr("Word length"), wordBits_);
-    addRow(*grid, tr("Fraction bits"), fractionBits_);
-    grid->setColumnStretch(1, 1);
+    buildFields(*grid);
     // The panel is longer than a small pane; it scrolls there.
     auto* scroll = new QScrollArea(this);
     auto* content = new QWidget;
@@ -140,8 +160,13 @@ void RealisationPane::build() {
     whole->addLayout(grid);
     whole->addWidget(outcome_);
     whole->addWidget(problem_);
+    whole->addWidget(limitedStep_);
+    whole->addWidget(limitedSentence_);
+    whole->addWidget(study_);
     whole->addWidget(exports_);
     whole->addStretch(1);
+    limitedSentence_->setWordWrap(true);
+    limitedSentence_->setVisible(false);
     outcome_->setWordWrap(true);
     problem_->setWordWrap(true);
 }
@@ -222,6 +247,76 @@ void RealisationPane::connectFields() {
     });
 }
 
+void RealisationPane::connectLimits() {
+    for (QuantityField* field : {lowest_, highest_}) {
+        field->setStepsByKeys(false);
+        connect(field, &QuantityField::problemChanged, problem_, &QLabel::setText);
+        connect(field, &QuantityField::valueEntered, this, &RealisationPane::changeLimits);
+    }
+    lowest_->setCheck([this](double value) {
+        return value < highest_->value().value_or(firstLimit)
+                   ? QString()
+                   : tr("Expected a value below the highest output.");
+    });
+    highest_->setCheck([this](double value) {
+        return value > lowest_->value().value_or(-firstLimit)
+                   ? QString()
+                   : tr("Expected a value above the lowest output.");
+    });
+    connect(limits_, &QCheckBox::clicked, this, &RealisationPane::changeLimits);
+}
+
+void RealisationPane::changeLimits() {
+    change(tr("Change output limits"), [this](Project& project) {
+        if (!limits_->isChecked()) {
+            project.realisation->output_limits.reset();
+            return;
+        }
+        project.realisation->output_limits = OutputLimits{lowest_->value().value_or(-firstLimit),
+                                                          highest_->value().value_or(firstLimit)};
+    });
+}
+
+void RealisationPane::connectStudy() {
+    connect(run_, &StudyRun::stepReady, this, [this](const auto& step) {
+        const auto& realisation = content_.project->realisation;
+        if (realisation && realisation->output_limits) {
+            limitedStep_->setStep(step, *realisation->output_limits);
+            limitedSentence_->setText(limitedStep_->sentence());
+            limitedSentence_->setVisible(true);
+        }
+    });
+    connect(run_, &StudyRun::studyReady, this,
+            [this](const auto& study) { study_->setStudy(content_.project, study); });
+    connect(study_, &StudyView::methodChosen, this, [this](Method method) {
+        choose(*method_, method);
+        Q_EMIT method_->activated(method_->currentIndex());
+    });
+    connect(&viewState(), &ViewState::shownCaseChanged, this, &RealisationPane::wantStudy);
+}
+
+void RealisationPane::wantStudy() {
+    const bool realised = content_.project && content_.project->realisation;
+    if (!realised || !content_.project->realisation->output_limits) {
+        limitedStep_->clear();
+        limitedSentence_->setVisible(false);
+    }
+    if (!realised || !content_.assessment) {
+        run_->stop();
+        study_->setStudy(nullptr, nullptr);
+        return;
+    }
+    if (isVisible()) {
+        study_->setPending();
+        run_->want({content_.project, content_.assessment, viewState().shownCase()});
+    }
+}
+
+void RealisationPane::showEvent(QShowEvent* event) {
+    Pane::showEvent(event);
+    wantStudy();
+}
+
 void RealisationPane::change(const QString& what, const std::function<void(Project&)>& edit) {
     if (!content_.project) {
         return;
@@ -235,8 +330,12 @@ void RealisationPane::change(const QString& what, const std::function<void(Proje
 }
 
 void RealisationPane::setContent(const PaneContent& content) {
+    const bool other = content.assessment != content_.assessment;
     content_ = content;
     refresh();
+    if (other) {
+        wantStudy();
+    }
 }
 
 void RealisationPane::refresh() {
@@ -264,6 +363,15 @@ void RealisationPane::refresh() {
     }
     wordBits_->setEnabled(realisation && fixed);
     fractionBits_->setEnabled(realisation && fixed);
+    limits_->setEnabled(realisation.has_value());
+    limits_->setChecked(shown.output_limits.has_value());
+    for (QuantityField* field : {lowest_, highest_}) {
+        field->setEnabled(shown.output_limits.has_value());
+    }
+    lowest_->setValue(shown.output_limits ? std::optional(shown.output_limits->at_least)
+                                          : std::nullopt);
+    highest_->setValue(shown.output_limits ? std::optional(shown.output_limits->at_most)
+                                           : std::nullopt);
     const bool matches = shown.method == Method::tustin_at;
     match_->setVisible(matches);
     matchLabel_->setVisible(matches);

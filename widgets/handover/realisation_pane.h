@@ -11,11 +11,15 @@ class QGridLayout;
 namespace cornerwright {
 
 class ExportRow;
+class LimitedStepView;
 class QuantityField;
+class StudyRun;
+class StudyView;
 class TextLabel;
 
 /// Sampling and realisation, changed in place: rate, delay, method, structure and number format.
-/// The realised loop follows at once.
+/// The realised loop follows at once; what the other choices would cost follows when the design has
+/// rested for a moment.
 class RealisationPane : public Pane {
     Q_OBJECT
 
@@ -26,9 +30,19 @@ class RealisationPane : public Pane {
     QString title() const override { return tr("Handover"); }
 
     ExportRow& exports() const { return *exports_; }
+    const StudyView& study() const { return *study_; }
+    const LimitedStepView& limitedStep() const { return *limitedStep_; }
+
+  protected:
+    void showEvent(QShowEvent* event) override;
 
   private:
     void build();
+    void buildFields(QGridLayout& grid);
+    void connectStudy();
+    void connectLimits();
+    void changeLimits();
+    void wantStudy();
     void addRow(QGridLayout& grid, const QString& label, QWidget* field);
     void connectFields();
     void refresh();
@@ -46,9 +60,16 @@ class RealisationPane : public Pane {
     QComboBox* format_;
     QComboBox* wordBits_;
     QuantityField* fractionBits_;
+    QCheckBox* limits_;
+    QuantityField* lowest_;
+    QuantityField* highest_;
     TextLabel* outcome_;
     TextLabel* problem_;
     ExportRow* exports_;
+    StudyView* study_;
+    LimitedStepView* limitedStep_;
+    TextLabel* limitedSentence_;
+    StudyRun* run_;
 };
 
 } // namespace cornerwright

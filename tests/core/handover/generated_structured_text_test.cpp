@@ -18,9 +18,8 @@ constexpr int short_run = 10000;
 /// The block of a compensator with the places of its inputs and its output.
 class RunningBlock {
   public:
-    RunningBlock(const RealisedSample& sample)
-        : program_(st::read_program(
-              handover_files(sample.input(), HandoverForm::structured_text).front().bytes)),
+    RunningBlock(const RealisedSample& sample, const std::string& text)
+        : program_(st::read_program(text)),
           block_(program_, sample.name),
           unit_(program_.unit(sample.name)),
           error_(unit_.slot_of("error")),
@@ -63,13 +62,18 @@ class RunningBlock {
     double scale_;
 };
 
+std::string text_of(const RealisedSample& sample) {
+    return handover_files(sample.input(), HandoverForm::structured_text).front().bytes;
+}
+
 /// The first sample at which the two differ; the number of samples where they do not.
-int first_difference(const RealisedSample& sample, const std::vector<double>& input) {
+int first_difference(const RealisedSample& sample, const std::string& text,
+                     const std::vector<double>& input) {
     const double restart =
         sample.equation().realisation.number_format.type == NumberFormat::Type::fixed
             ? std::ldexp(200.0, -sample.equation().realisation.number_format.fraction_bits)
             : 0.25;
-    RunningBlock block(sample);
+    RunningBlock block(sample, text);
     BitTrueRun run(sample.equation());
     for (std::size_t i = 0; i < input.size(); ++i) {
         if (i == input.size() / 2) {
@@ -102,7 +106,8 @@ TEST_P(GeneratedStructuredText, EqualsTheBitTrueRun) {
         const std::vector<double> input =
             long_input(choice.format, method == choice.followed ? long_run : short_run);
         for (const RealisedSample& sample : samples)
-            EXPECT_EQ(first_difference(sample, input), static_cast<int>(input.size()))
+            EXPECT_EQ(first_difference(sample, text_of(sample), input),
+                      static_cast<int>(input.size()))
                 << sample.project.title << ", " << words_of(realisation);
     }
 }
@@ -123,6 +128,24 @@ INSTANTIATE_TEST_SUITE_P(
                std::string(name_of(format.type)) +
                (format.type == NumberFormat::Type::fixed ? std::to_string(format.word_bits) : "");
     });
+
+/// The comparison sees one wrong sign, one wrong digit and a wrong rounding.
+TEST(StructuredTextComparison, FindsWhatIsWrong) {
+    Realisation realisation;
+    realisation.structure = Structure::direct_form_1;
+    realisation.number_format = {NumberFormat::Type::fixed, 32, 24};
+    const RealisedSample sample = realised_samples(realisation)[3];
+    const std::vector<double> input = long_input(realisation.number_format, short_run);
+    for (const auto& [right, wrong] :
+         {std::pair(" - s1_a1 ", " + s1_a1 "), std::pair("s1_b0 : LINT := ", "s1_b0 : LINT := 1"),
+          std::pair("(sum + divisor / 2)", "(sum)")}) {
+        std::string text = text_of(sample);
+        const std::size_t place = text.find(right);
+        ASSERT_NE(place, std::string::npos) << right << "\n" << text;
+        text.replace(place, std::string(right).size(), wrong);
+        EXPECT_LT(first_difference(sample, text, input), short_run) << right;
+    }
+}
 
 } // namespace
 } // namespace cornerwright::test
