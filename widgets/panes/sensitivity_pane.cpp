@@ -69,6 +69,9 @@ std::optional<AxisRange> SensitivityPane::fittedVertical(const AxisRange& freque
             for (const double db : within(item.design.curves.w_rad_s,
                                           member.decibels(item.design.curves), frequencies))
                 values.push_back(std::clamp(db, useful_db.low, useful_db.high));
+    for (const Requirement& requirement : project()->requirements)
+        if (requirement.at_most && limitedFrequencies(requirement))
+            values.push_back(std::clamp(*requirement.at_most, useful_db.low, useful_db.high));
     return rangeOf(values, 0.04, 1.0);
 }
 
@@ -217,9 +220,8 @@ void SensitivityPane::drawFollowed(QPainter& painter, const CaseAssessment& show
     }
     const LoopAssessment* loop = loopOf(shown, judgement->loop);
     const double w = judgement->at_rad_s.value();
-    const auto db = loop != nullptr
-                        ? interpolateOnLog(loop->curves.w_rad_s, loop->curves.*curve, w)
-                        : std::nullopt;
+    const auto db = loop != nullptr ? interpolateOnLog(loop->curves.w_rad_s, loop->curves.*curve, w)
+                                    : std::nullopt;
     if (!db)
         return;
     const QPointF at(mapX().toPixel(w), mapY().toPixel(*db));

@@ -79,6 +79,24 @@ std::optional<double> StepPane::finalValue() const {
     return error.is_value() ? std::optional(1.0 - error.value()) : std::nullopt;
 }
 
+void StepPane::addLimits(std::vector<double>& values, double& end) const {
+    constexpr double farthest_percent = 100.0;
+    constexpr double farthest_time = 3.0; // times what the curves need
+    const auto final = finalValue();
+    if (project() == nullptr || signal_ != Signal::output || !final)
+        return;
+    const double endOfCurves = end;
+    for (const Requirement& requirement : project()->requirements) {
+        if (!requirement.at_most)
+            continue;
+        if (requirement.measure == Measure::overshoot && *requirement.at_most < farthest_percent)
+            values.push_back(*final * (1.0 + *requirement.at_most / 100.0));
+        if (requirement.measure == Measure::settling_time &&
+            *requirement.at_most < farthest_time * endOfCurves)
+            end = std::max(end, 1.05 * *requirement.at_most);
+    }
+}
+
 std::optional<PlotRanges> StepPane::fittedRanges() const {
     if (!content().assessment)
         return std::nullopt;
@@ -94,6 +112,7 @@ std::optional<PlotRanges> StepPane::fittedRanges() const {
     }
     if (end <= 0.0)
         return std::nullopt;
+    addLimits(values, end);
     return PlotRanges{{0.0, end}, *rangeOf(values, 0.08, 1e-12)};
 }
 

@@ -45,6 +45,8 @@ class StepPane : public PlotPane {
     std::set<std::size_t> worstHere() const;
     /// A ring where overshoot or settling time of the followed requirement is read off.
     void drawFollowed(QPainter& painter, LabelPlacer& placer) const;
+    /// Widens what is fitted so that the limits can be seen, and so dragged.
+    void addLimits(std::vector<double>& values, double& end) const;
     void drawNote(QPainter& painter) const;
     void drawReading(QPainter& painter) const;
 
