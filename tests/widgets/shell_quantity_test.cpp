@@ -72,7 +72,7 @@ TEST(Quantity, ExactNumberComesBackBitForBit) {
 }
 
 TEST(Quantity, ExactNumberIsShortWhereTheUserTypedAShortOne) {
-    for (const char* typed : {"6.05", "12", "0.1", "302"}) {
+    for (const char* typed : {"6.05", "12", "0.1", "302", "500", "2000"}) {
         const double value = read(typed, QuantityKind::frequency, "Hz");
         EXPECT_EQ(exactNumber(value, QuantityKind::frequency, QStringLiteral("Hz")),
                   QString::fromUtf8(typed));

@@ -1,6 +1,6 @@
 #include "widgets/handover/export_row.h"
 
-#include "core/handover/cautions.h"
+#include "widgets/handover/caution_text.h"
 #include "widgets/parts/link_button.h"
 #include "widgets/parts/text_label.h"
 
@@ -12,6 +12,32 @@
 #include <algorithm>
 
 namespace cornerwright {
+
+namespace {
+
+/// What every file will say too; nothing where all is met.
+QString warningOf(const Verdict& verdict) {
+    const auto count = [&verdict](State state) {
+        return std::ranges::count_if(
+            verdict.requirements,
+            [state](const RequirementResult& result) { return result.worst.state == state; });
+    };
+    if (verdict.requirements.empty()) {
+        return ExportRow::tr("? No requirement is stated; nothing was judged, and every file will "
+                             "say so.");
+    }
+    if (const auto unmet = count(State::unmet); unmet > 0) {
+        return ExportRow::tr("✗ %1 of the requirements are unmet; every file will say so.")
+            .arg(unmet);
+    }
+    if (const auto open = count(State::undetermined); open > 0) {
+        return ExportRow::tr("? %1 of the requirements are not determined; every file will say so.")
+            .arg(open);
+    }
+    return {};
+}
+
+} // namespace
 
 ExportRow::ExportRow(QWidget* parent)
     : QWidget(parent),
@@ -48,11 +74,7 @@ ExportRow::ExportRow(QWidget* parent)
     buttons->addWidget(report, last / perRow, last % perRow, Qt::AlignLeft);
     buttons->setColumnStretch(perRow, 1);
     auto* caution = new TextLabel(QString(), TextLabel::Kind::muted, this);
-    QStringList sentences;
-    for (const std::string& sentence : cautions()) {
-        sentences << QString::fromStdString(sentence);
-    }
-    caution->setText(sentences.join(QLatin1Char(' ')));
+    caution->setText(cautionSentences().join(QLatin1Char(' ')));
     caution->setWordWrap(true);
     warning_->setWordWrap(true);
     whole->addLayout(names);
@@ -70,14 +92,8 @@ void ExportRow::setAssessment(const Assessment* assessment) {
     for (QWidget* button : exports_) {
         button->setEnabled(assessment != nullptr && assessment->equation.has_value());
     }
-    const auto unmet = assessment == nullptr
-                           ? 0
-                           : std::ranges::count_if(assessment->verdict.requirements,
-                                                   [](const RequirementResult& result) {
-                                                       return result.worst.state == State::unmet;
-                                                   });
-    warning_->setText(tr("✗ %1 of the requirements are unmet; every file will say so.").arg(unmet));
-    warning_->setVisible(unmet > 0);
+    warning_->setText(assessment == nullptr ? QString() : warningOf(assessment->verdict));
+    warning_->setVisible(!warning_->text().isEmpty());
 }
 
 } // namespace cornerwright

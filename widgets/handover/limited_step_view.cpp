@@ -82,7 +82,11 @@ void LimitedStepView::drawSignal(QPainter& painter, const QRectF& area,
     for (const double level : levels) {
         painter.setPen(QPen(theme.colour(ColourRole::muted), 1.0, Qt::DashLine));
         painter.drawLine(QPointF(area.left(), yOf(level)), QPointF(area.right(), yOf(level)));
-        painter.drawText(QPointF(area.left() + margin, yOf(level) - 2.0), numberText(level));
+        const double letters = painter.fontMetrics().height();
+        const bool fitsAbove = yOf(level) - area.top() > letters;
+        painter.drawText(
+            QPointF(area.left() + 4.0 * margin, yOf(level) + (fitsAbove ? -2.0 : letters)),
+            numberText(level));
     }
     QPainterPath path;
     for (std::size_t i = 0; i < values.size(); ++i) {
@@ -92,7 +96,7 @@ void LimitedStepView::drawSignal(QPainter& painter, const QRectF& area,
     painter.setPen(QPen(theme.colour(ColourRole::ink), 1.3));
     painter.drawPath(path);
     painter.setPen(theme.colour(ColourRole::muted));
-    painter.drawText(area.adjusted(margin, 2.0, -margin, -2.0), Qt::AlignRight | Qt::AlignTop,
+    painter.drawText(area.adjusted(margin, 2.0, -margin, -2.0), Qt::AlignRight | Qt::AlignVCenter,
                      name);
 }
 

@@ -43,7 +43,8 @@ QString poleSentence(const RealisationStudy& study) {
                                 : StudyView::tr("loses a pole"));
     }
     const auto best = best_structure(study.pole_errors);
-    return best ? StudyView::tr("Error of the poles in this number format: %1. %2 keeps them best.")
+    return best ? StudyView::tr(
+                      "Error of the poles in this number format: %1. They are kept best by: %2.")
                       .arg(parts.join(QStringLiteral(", ")), structureText(best->structure))
                 : QString();
 }

@@ -135,6 +135,19 @@ QString withDigits(double number, int digits) {
     return QString::fromLatin1(buffer.data(), end.ptr - buffer.data());
 }
 
+/// "500" for "5e+02"; very large and very small numbers keep their exponent.
+QString withoutExponent(double number, const QString& text) {
+    constexpr double least = 1e-5;
+    constexpr double most = 1e9;
+    if (!text.contains(QLatin1Char('e')) || std::abs(number) < least || std::abs(number) > most) {
+        return text;
+    }
+    std::array<char, 40> buffer{};
+    const auto end = std::to_chars(buffer.data(), buffer.data() + buffer.size(), number,
+                                   std::chars_format::fixed);
+    return QString::fromLatin1(buffer.data(), end.ptr - buffer.data());
+}
+
 QString unknownUnit(QuantityKind kind, const QString& written) {
     QStringList known;
     for (const Unit& unit : unitsOf(kind)) {
@@ -195,7 +208,7 @@ QString exactNumber(double value, QuantityKind kind, const QString& unitText) {
         const QString text = withDigits(number, digits);
         const std::optional<double> back = readNumber(text);
         if (back && toBase(*back, unit) == value) {
-            return text;
+            return withoutExponent(*back, text);
         }
     }
     return withDigits(number, mostDigits);

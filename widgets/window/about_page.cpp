@@ -1,5 +1,6 @@
 #include "widgets/window/about_page.h"
 
+#include "widgets/handover/caution_text.h"
 #include "widgets/parts/link_button.h"
 #include "widgets/parts/panel_frame.h"
 #include "widgets/parts/text_label.h"
@@ -40,11 +41,9 @@ AboutPage::AboutPage(QWidget* parent) : QWidget(parent) {
            "plant, over corners dragged into place, to the difference equation that the firmware "
            "runs, with every margin judged on every unit."));
     add(tr("Cautions"), TextLabel::Kind::strong);
-    add(tr("Closing a loop on real equipment can move, heat or energise it without warning. First "
-           "close it with limited effort, an independent stop, and nobody in reach."));
-    add(tr("These figures rest on the plant data given. They say nothing of saturation, faults or "
-           "what was not measured."));
-    add(tr("Local codes, the machine's risk assessment and licensed practice decide."));
+    for (const QString& sentence : cautionSentences()) {
+        add(sentence);
+    }
     add(tr("Licence"), TextLabel::Kind::strong);
     add(tr("Free software under the GNU General Public License, version 3 or later. There is no "
            "warranty, to the extent permitted by law."));

@@ -116,7 +116,7 @@ TEST_F(HandoverPane, ShowsWhatEachMethodCosts) {
             headroomText(outcome.worst[0], project.requirements[0])));
     }
     for (const char* said : {"Words of 16 bits: at least", "Words of 32 bits: at least",
-                             "keeps them best", "Rounding noise", "limit cycle"}) {
+                             "They are kept best by", "Rounding noise", "limit cycle"}) {
         EXPECT_TRUE(words().contains(QString::fromLatin1(said))) << said;
     }
 }
