@@ -60,7 +60,7 @@ def kill_once(program, command_line, source, seed):
         environment = dict(os.environ, QT_QPA_PLATFORM="offscreen", HOME=home)
         victim = subprocess.Popen(
             [program, project, recovery, os.path.join(home, "window.ini"), str(seed)],
-            env=environment, stdout=subprocess.PIPE, text=True)
+            env=environment, stdout=subprocess.PIPE, stderr=subprocess.DEVNULL, text=True)
         edits, thread = edits_told(victim)
         while not edits:
             if victim.poll() is not None:

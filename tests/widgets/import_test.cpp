@@ -17,6 +17,7 @@
 #include <QCheckBox>
 #include <QComboBox>
 #include <QFile>
+#include <QLineEdit>
 #include <QPushButton>
 #include <QSignalSpy>
 #include <QSpinBox>
@@ -136,12 +137,13 @@ TEST_F(ImportTest, FourDroppedFilesOfFourKindsBecomeFourCasesInOneStep) {
     const Project before = window.document().project();
     const QStringList files{
         write(QStringLiteral("unit 1.csv"), plainTable()),
-        write(QStringLiteral("unit 2.csv"),
-              table("Frequenz (Hz);Betrag (dB);Phase (Grad)",
-                    [](double hertz, Complex value) {
-                        return (number(hertz) + ';' + decibels(value) + ';' + degrees(value))
-                            .replace('.', ',');
-                    })),
+        write(QStringLiteral("unit 2.csv"), table("Frequenz (Hz);Betrag (dB);Phase (°)",
+                                                  [](double hertz, Complex value) {
+                                                      return QByteArray(number(hertz) + ';' +
+                                                                        decibels(value) + ';' +
+                                                                        degrees(value))
+                                                          .replace('.', ',');
+                                                  })),
         write(QStringLiteral("unit 3.csv"),
               table("w (rad/s)\tRe\tIm",
                     [](double hertz, Complex value) {
@@ -287,6 +289,11 @@ TEST_F(ImportTest, SignAndDelayAreTakenOut) {
 }
 
 TEST_F(ImportTest, ATimeRecordIsRecognisedAndItsUncertaintyTravelsToTheMargins) {
+    // A gain with which the loop crosses 0 dB inside the measured band.
+    Project slow = window.document().project();
+    slow.compensator.resize(1);
+    slow.compensator.front().gain = 0.1;
+    window.document().apply(slow, QStringLiteral("Lower the gain"));
     window.files().take(
         {QStringLiteral(CORNERWRIGHT_TEST_DATA "/core/measurement/data/records/belt-sweep.csv")});
     waitForPanel();

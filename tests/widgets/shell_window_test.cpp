@@ -122,6 +122,21 @@ TEST_F(WindowTest, AnExactValueWithItsUnitIsTypedIntoACard) {
     EXPECT_DOUBLE_EQ(zero->value().value_or(0.0), 25.0);
 }
 
+TEST_F(WindowTest, UndoInAFieldThatIsNotBeingTypedInIsTheWindowsUndo) {
+    window.activateWindow();
+    QuantityField* zero = window.chain().cards().at(1)->fields().at(0);
+    zero->setFocus();
+    zero->selectAll();
+    QTest::keyClicks(zero, QStringLiteral("12 Hz"));
+    QTest::keyClick(zero, Qt::Key_Z, Qt::ControlModifier); // takes the typing back
+    EXPECT_EQ(window.document().project(), smallProject());
+    QTest::keyClicks(zero, QStringLiteral("12 Hz"));
+    QTest::keyClick(zero, Qt::Key_Return);
+    ASSERT_NE(window.document().project(), smallProject());
+    QTest::keyClick(zero, Qt::Key_Z, Qt::ControlModifier);
+    EXPECT_EQ(window.document().project(), smallProject());
+}
+
 TEST_F(WindowTest, AValueThatCannotStandIsRefusedInPlace) {
     QuantityField* zero = window.chain().cards().at(1)->fields().at(0);
     zero->setFocus();

@@ -120,6 +120,18 @@ void QuantityField::step(double factor) {
     showExact();
 }
 
+bool QuantityField::event(QEvent* event) {
+    if (event->type() == QEvent::ShortcutOverride && !typing_) {
+        const auto* key = static_cast<QKeyEvent*>(event);
+        if (key->matches(QKeySequence::Undo) || key->matches(QKeySequence::Redo)) {
+            // A value once taken is a step of the window's history, not of this line's.
+            event->ignore();
+            return false;
+        }
+    }
+    return QLineEdit::event(event);
+}
+
 void QuantityField::focusInEvent(QFocusEvent* event) {
     QLineEdit::focusInEvent(event);
     if (!typing_) {

@@ -45,6 +45,7 @@ class QuantityField : public QLineEdit {
     void problemChanged(const QString& problem);
 
   protected:
+    bool event(QEvent* event) override;
     void focusInEvent(QFocusEvent* event) override;
     void focusOutEvent(QFocusEvent* event) override;
     void keyPressEvent(QKeyEvent* event) override;
