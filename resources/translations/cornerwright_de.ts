@@ -196,6 +196,25 @@
     </message>
 </context>
 <context>
+    <name>cautions</name>
+    <message>
+        <source>Closing a loop on real equipment can move, heat or energise it without warning.</source>
+        <translation>Einen Regelkreis an einer echten Anlage zu schließen kann sie ohne Warnung bewegen, heizen oder unter Spannung setzen.</translation>
+    </message>
+    <message>
+        <source>First close it with limited effort, an independent stop, and nobody in reach.</source>
+        <translation>Zuerst mit begrenztem Stellaufwand schließen, mit unabhängigem Halt, und niemand in Reichweite.</translation>
+    </message>
+    <message>
+        <source>These figures rest on the plant data given and say nothing of saturation, faults or what was not measured.</source>
+        <translation>Diese Kennzahlen beruhen auf den gegebenen Daten der Strecke und sagen nichts von Sättigung, Fehlern oder dem, was nicht gemessen wurde.</translation>
+    </message>
+    <message>
+        <source>Local codes, the machine&apos;s risk assessment and licensed practice decide.</source>
+        <translation>Örtliche Vorschriften, die Risikobeurteilung der Maschine und zugelassene Fachleute entscheiden.</translation>
+    </message>
+</context>
+<context>
     <name>cornerwright</name>
     <message>
         <source>%1 could not be loaded</source>
@@ -443,11 +462,11 @@
     </message>
     <message>
         <source>%1 over</source>
-        <translation>%1 zu viel</translation>
+        <translation>%1 drüber</translation>
     </message>
     <message>
         <source>%1 short</source>
-        <translation>%1 zu wenig</translation>
+        <translation>%1 fehlen</translation>
     </message>
     <message>
         <source>design</source>
@@ -463,7 +482,7 @@
     </message>
     <message>
         <source>%1 of %2 unmet · worst: %3</source>
-        <translation>%1 von %2 verletzt · schlechteste: %3</translation>
+        <translation>%1 von %2 verletzt · zuerst: %3</translation>
     </message>
     <message>
         <source>%1 of %2 not determined</source>
@@ -604,6 +623,19 @@
     <message>
         <source>delay of %1 s taken out</source>
         <translation>Totzeit von %1 s herausgenommen</translation>
+    </message>
+    <message>
+        <source>small</source>
+        <comment>how nouns start inside a sentence: translate to small or large</comment>
+        <translation>large</translation>
+    </message>
+    <message>
+        <source>%1 points have a coherence below %2</source>
+        <translation>%1 Punkte haben eine Kohärenz unter %2</translation>
+    </message>
+    <message>
+        <source>points with a coherence below %1 left out</source>
+        <translation>Punkte mit einer Kohärenz unter %1 ausgelassen</translation>
     </message>
 </context>
 <context>
@@ -1459,6 +1491,14 @@
         <source>? choose</source>
         <translation>? wählen</translation>
     </message>
+    <message>
+        <source>a coherence is from 0 to 1</source>
+        <translation>eine Kohärenz liegt zwischen 0 und 1</translation>
+    </message>
+    <message>
+        <source>Leave out below coherence</source>
+        <translation>Auslassen unter Kohärenz</translation>
+    </message>
 </context>
 <context>
     <name>cornerwright::ImportPanel</name>
@@ -1559,7 +1599,7 @@
     </message>
     <message>
         <source>worst</source>
-        <translation>schlechteste</translation>
+        <translation>Wert</translation>
     </message>
     <message>
         <source>where</source>
@@ -1892,10 +1932,6 @@
         <translation>linear</translation>
     </message>
     <message>
-        <source>Radius beyond 1 drawn as 1 + ln r, so that all of the loop stays in sight</source>
-        <translation>Radius über 1 als 1 + ln r gezeichnet, damit der ganze Kreis in Sicht bleibt</translation>
-    </message>
-    <message>
         <source>The plane as it is</source>
         <translation>Die Ebene, wie sie ist</translation>
     </message>
@@ -1906,6 +1942,10 @@
     <message>
         <source>Nyquist</source>
         <translation>Nyquist</translation>
+    </message>
+    <message>
+        <source>Radius beyond 1 drawn about one unit a decade, so that all of the loop stays in sight</source>
+        <translation>Radius über 1 mit etwa einer Einheit je Dekade gezeichnet, damit der ganze Kreis in Sicht bleibt</translation>
     </message>
 </context>
 <context>

@@ -37,7 +37,10 @@ class Menus:
         self.click(top)
         report = self.window.wait(f"menu {path[0]}", lambda r: len(r["open_menus"]) == 1)
         for depth, text in enumerate(path[1:], start=2):
-            self.click(entry_of(report["open_menus"][-1], text))
+            entry = entry_of(report["open_menus"][-1], text)
+            if entry is None or not entry["enabled"]:
+                return []  # a menu that is filled anew each time no longer has it
+            self.click(entry)
             report = self.window.wait(f"menu {text}", lambda r: len(r["open_menus"]) == depth)
         return report["open_menus"][-1]
 

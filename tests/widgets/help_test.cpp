@@ -2,6 +2,7 @@
 #include "widgets/chain/chain_panel.h"
 #include "widgets/chain/section_card.h"
 #include "widgets/figure_text.h"
+#include "widgets/handover/caution_text.h"
 #include "widgets/help/help_panel.h"
 #include "widgets/ledger/ledger_model.h"
 #include "widgets/ledger/ledger_panel.h"
@@ -125,7 +126,12 @@ TEST(Language, GermanStandsInTheWindowAndInTheFigures) {
                            folder.filePath(QStringLiteral("recovery"))});
         EXPECT_EQ(window.menuBar()->actions().front()->text(), QStringLiteral("&Datei"));
     }
+    const QStringList cautionsThere = cautionSentences();
     applyLanguage(QStringLiteral("en"));
+    ASSERT_EQ(cautionsThere.size(), cautionSentences().size());
+    for (qsizetype i = 0; i < cautionsThere.size(); ++i) {
+        EXPECT_NE(cautionsThere[i], cautionSentences()[i]);
+    }
     EXPECT_EQ(measureText(Measure::phase_margin), english.front());
 }
 
