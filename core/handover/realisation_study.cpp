@@ -146,7 +146,7 @@ FractionBits smallest_fraction_bits(const Project& project, int word_bits,
 }
 
 std::string fraction_bits_words(const FractionBits& bits) {
-    const std::string head = "smallest fraction_bits with which every realised loop meets every "
+    const std::string head = "Smallest fraction_bits with which every realised loop meets every "
                              "requirement, in words of " +
                              std::to_string(bits.word_bits) + " bits: ";
     return head +
@@ -157,13 +157,13 @@ std::vector<std::string> pole_error_words(const std::vector<PoleError>& errors) 
     std::vector<std::string> lines;
     for (const PoleError& error : errors) {
         const Figure& relative = error.largest_relative_error;
-        lines.push_back("largest relative pole error in " + std::string(name_of(error.structure)) +
+        lines.push_back("Largest relative pole error in " + std::string(name_of(error.structure)) +
                         ": " +
                         (relative.is_value() ? number_text(relative.value(), 3)
                                              : "not determined, " + relative.reason()));
     }
     if (const auto best = best_structure(errors))
-        lines.push_back("the structure that keeps the poles best: " +
+        lines.push_back("The structure that keeps the poles best: " +
                         std::string(name_of(best->structure)));
     return lines;
 }

@@ -176,6 +176,10 @@ int spread_gain(std::vector<ScaledSection>& sections, const Realisation& realisa
     // of full scale.
     const double target = std::min(range, std::max(1.0, bounds.back().output));
 
+    // What amplification on the way gains against the rounding of signals, the last numerators lose
+    // in bits of their coefficients: no more than a quarter of them (our choice).
+    const int most = realisation.number_format.fraction_bits / 4;
+
     int so_far = 0;
     for (std::size_t i = 0; i < sections.size(); ++i) {
         const double bound = bounds[i].largest();
@@ -184,6 +188,7 @@ int spread_gain(std::vector<ScaledSection>& sections, const Realisation& realisa
             const int allowed = static_cast<int>(std::floor(std::log2(target / bound))) - so_far;
             exponent = i + 1 == sections.size() ? std::min(allowed, -so_far) : allowed;
         }
+        exponent = std::min(exponent, most - so_far);
         while (exponent > -realisation.number_format.word_bits - so_far &&
                !costs_no_shift(sections[i], exponent, realisation, delta_shifts[i]))
             --exponent;

@@ -87,6 +87,16 @@ TEST(RealisationStudy, SmallestFractionBitsAreTheFirstThatMeetEverything) {
     }
 }
 
+/// The room of a wide word was seen to be spent on amplifying inner signals, so that the last
+/// section was left with a few bits for its coefficients.
+TEST(RealisationStudy, AWiderWordNeedsHardlyMoreFractionBits) {
+    const Project project = servo_project();
+    const FractionBits narrow = smallest_fraction_bits(project, 16, always);
+    const FractionBits wide = smallest_fraction_bits(project, 32, always);
+    ASSERT_TRUE(narrow.smallest && wide.smallest);
+    EXPECT_LE(*wide.smallest, *narrow.smallest + *narrow.smallest / 4);
+}
+
 TEST(RealisationStudy, SaysWhyThereAreNoSmallestFractionBits) {
     Project project = servo_project();
     project.requirements.push_back(requirement_of(Measure::phase_margin, 85.0, std::nullopt));
