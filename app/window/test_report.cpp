@@ -135,7 +135,7 @@ void TestReport::write() {
     report[QStringLiteral("fit")] = fitReport(window_.measurements().fitPanel());
     report[QStringLiteral("cases")] =
         caseReport(window_.document().project(), content.assessment.get());
-    report[QStringLiteral("locus")] = content.locus != nullptr;
+    report[QStringLiteral("locus")] = content.locus && !content.locus->branches.empty();
     QJsonObject panes;
     for (const auto& [key, pane] : window_.area().panes()) {
         QJsonObject entry = placeOf(*pane);

@@ -50,6 +50,24 @@ MeasuredResponse with_delay_removed(MeasuredResponse measured, double delay_s) {
     return measured;
 }
 
+MeasuredResponse with_least_coherence(const MeasuredResponse& measured, double least) {
+    if (measured.coherence.empty())
+        throw InputError({}, "a measurement with coherence, to leave points out by it", "none");
+    MeasuredResponse kept;
+    kept.averages = measured.averages;
+    for (std::size_t i = 0; i < measured.w_rad_s.size(); ++i) {
+        if (measured.coherence[i] < least)
+            continue;
+        kept.w_rad_s.push_back(measured.w_rad_s[i]);
+        kept.response.push_back(measured.response[i]);
+        kept.coherence.push_back(measured.coherence[i]);
+    }
+    if (kept.w_rad_s.size() < 2)
+        throw InputError({}, "at least two points of that coherence",
+                         std::to_string(kept.w_rad_s.size()));
+    return kept;
+}
+
 MeasuredResponse edited(MeasuredResponse measured, const ReadOptions& options) {
     if (options.flip_sign)
         measured = with_sign_flipped(std::move(measured));

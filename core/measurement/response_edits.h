@@ -12,6 +12,10 @@ MeasuredResponse with_sign_flipped(MeasuredResponse measured);
 /// The response without a known delay: multiplied by exp(+jw delay).
 MeasuredResponse with_delay_removed(MeasuredResponse measured, double delay_s);
 
+/// The points whose coherence is not below `least`: outside the excited band an estimate is noise.
+/// Throws InputError where no coherence was measured, or fewer than two points are left.
+MeasuredResponse with_least_coherence(const MeasuredResponse& measured, double least);
+
 /// Sign and delay as the options say.
 MeasuredResponse edited(MeasuredResponse measured, const ReadOptions& options);
 

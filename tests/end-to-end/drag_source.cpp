@@ -7,12 +7,16 @@
 #include <QMimeData>
 #include <QMouseEvent>
 #include <QScreen>
+#include <QTimer>
 #include <QUrl>
 #include <QWidget>
+
+#include <chrono>
 
 namespace {
 
 constexpr int side = 80;
+constexpr std::chrono::seconds timeToFetch{5};
 
 class Source : public QWidget {
   public:
@@ -35,7 +39,8 @@ class Source : public QWidget {
         auto* drag = new QDrag(this);
         drag->setMimeData(dragged);
         drag->exec(Qt::CopyAction);
-        QApplication::quit();
+        // The other side fetches the data after the drop.
+        QTimer::singleShot(timeToFetch, &QApplication::quit);
     }
 
   private:

@@ -45,7 +45,7 @@ def write_files(folder):
     return [
         table("unit 1.csv", "Frequency (Hz),Magnitude (dB),Phase (deg)",
               lambda f, p: f"{f!r},{db(p)!r},{math.degrees(cmath.phase(p))!r}", GAINS[0]),
-        table("unit 2.csv", "Frequenz (Hz);Betrag (dB);Phase (Grad)",
+        table("unit 2.csv", "Frequenz (Hz);Betrag (dB);Phase (°)",
               lambda f, p: f"{f!r};{db(p)!r};{math.degrees(cmath.phase(p))!r}".replace(".", ","), GAINS[1]),
         table("unit 3.csv", "w (rad/s),Re,Im", lambda f, p: f"{2 * math.pi * f!r},{p.real!r},{p.imag!r}", GAINS[2]),
         table("unit 4.csv", "Frequency (Hz),Magnitude (dB),Phase (deg)", lambda f, p: f"{f!r},{db(p)!r},{cmath.phase(p)!r}", GAINS[3]),

@@ -26,6 +26,7 @@
 #include <gmock/gmock.h>
 #include <gtest/gtest.h>
 
+#include <algorithm>
 #include <cmath>
 #include <numbers>
 
@@ -110,6 +111,18 @@ class ImportTest : public testing::Test {
         ASSERT_GE(index, 0) << data.toStdString();
         box->setCurrentIndex(index);
         Q_EMIT box->activated(index);
+    }
+
+    /// Keys into a field of the form, by its name.
+    void type(const QString& name, const QString& keys) {
+        for (QLineEdit* field : panel().form().findChildren<QLineEdit*>()) {
+            if (field->accessibleName() == name) {
+                field->setFocus();
+                QTest::keyClicks(field, keys);
+                return;
+            }
+        }
+        FAIL() << "no field " << name.toStdString();
     }
 
     QComboBox* formBox(const QString& name) {
@@ -277,12 +290,7 @@ TEST_F(ImportTest, SignAndDelayAreTakenOut) {
     for (QCheckBox* box : panel().form().findChildren<QCheckBox*>()) {
         box->click();
     }
-    for (QLineEdit* field : panel().form().findChildren<QLineEdit*>()) {
-        if (field->accessibleName() == QStringLiteral("Delay to take out")) {
-            field->setFocus();
-            QTest::keyClicks(field, QStringLiteral("2 ms\r"));
-        }
-    }
+    type(QStringLiteral("Delay to take out"), QStringLiteral("2 ms\r"));
     waitForPanel();
     ASSERT_NE(panel().entries().front().look->plant, nullptr);
     EXPECT_LT(worstError(*panel().entries().front().look->plant), 1e-9);
@@ -305,10 +313,13 @@ TEST_F(ImportTest, ATimeRecordIsRecognisedAndItsUncertaintyTravelsToTheMargins) 
     waitForPanel();
     ASSERT_NE(panel().entries().front().look->plant, nullptr)
         << panel().entries().front().look->problem.toStdString();
+    type(QStringLiteral("Leave out below coherence"), QStringLiteral("0.8\r"));
+    waitForPanel();
     const std::size_t count = cases().size();
     panel().takeIn();
     ASSERT_EQ(cases().size(), count + 1);
     const MeasuredResponse& response = *sourceOf(count).response;
+    EXPECT_GE(*std::ranges::min_element(response.coherence), 0.8);
     EXPECT_EQ(response.averages, 15.0);
     EXPECT_EQ(random_errors(response).size(), response.w_rad_s.size());
     EXPECT_TRUE(QFile::exists(folder.filePath(QStringLiteral("belt-sweep-plant.csv"))));
@@ -368,6 +379,8 @@ TEST_F(ImportTest, AFitIsShownTakenIntoTheCaseAndFollowedByLocusAndStep) {
     ASSERT_TRUE(overshoot.is_determined()) << overshoot.reason();
     EXPECT_THAT(overshoot.note(), testing::HasSubstr("fit"));
     ASSERT_TRUE(window.live().content().locus);
+    EXPECT_FALSE(window.live().content().locus->branches.empty());
+    EXPECT_THAT(window.live().content().locus->note, testing::HasSubstr("fit"));
     window.actions().undo->trigger();
     EXPECT_EQ(window.document().project(), before);
 }

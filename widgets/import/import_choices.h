@@ -15,9 +15,10 @@ struct ImportChoices {
 
     QString name; ///< of the plant case
     Holds holds = Holds::response;
-    ReadOptions reading;      ///< columns, units, parameter; sign and delay for records too
-    RecordOptions record;     ///< channels and rate of a time record
-    EstimateOptions estimate; ///< how a response is made of a time record
+    ReadOptions reading;         ///< columns, units, parameter; sign and delay for records too
+    RecordOptions record;        ///< channels and rate of a time record
+    EstimateOptions estimate;    ///< how a response is made of a time record
+    double leastCoherence = 0.0; ///< points below are left out; 0: none
     MeasuredQuantity quantity = MeasuredQuantity::plant;
     int integrators = 0;
     int unstablePoles = 0;
@@ -29,7 +30,8 @@ inline bool needsOwnFile(const ImportChoices& choices) {
     const ReadOptions& reading = choices.reading;
     return choices.holds == ImportChoices::Holds::time_record ||
            choices.quantity != MeasuredQuantity::plant || !reading.columns.empty() ||
-           !reading.parameter.empty() || reading.flip_sign || reading.remove_delay_s != 0.0;
+           !reading.parameter.empty() || reading.flip_sign || reading.remove_delay_s != 0.0 ||
+           choices.leastCoherence > 0.0;
 }
 
 } // namespace cornerwright

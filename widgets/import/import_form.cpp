@@ -55,6 +55,7 @@ ImportForm::ImportForm(QWidget* parent)
       quantity_(new QComboBox(this)),
       sign_(new QCheckBox(tr("Turn the sign"), this)),
       delay_(new QuantityField(QuantityKind::time, this)),
+      coherence_(new QuantityField(QuantityKind::plain, this)),
       integrators_(new QSpinBox(this)),
       unstablePoles_(new QSpinBox(this)) {
     form_->setContentsMargins(8, 4, 8, 4);
@@ -69,7 +70,7 @@ ImportForm::ImportForm(QWidget* parent)
         box->setMinimumContentsLength(10);
         connect(box, &QComboBox::activated, this, &ImportForm::changed);
     }
-    for (QuantityField* field : {samplePeriod_, delay_}) {
+    for (QuantityField* field : {samplePeriod_, delay_, coherence_}) {
         field->setMayBeEmpty(true);
         field->setStepsByKeys(false);
         connect(field, &QuantityField::valueEntered, this, &ImportForm::changed);
@@ -126,6 +127,11 @@ void ImportForm::addPlantRows() {
     form_->addRow(QString(), sign_);
     delay_->setPlaceholderText(tr("none"));
     form_->addRow(tr("Delay to take out"), delay_);
+    coherence_->setPlaceholderText(tr("none"));
+    coherence_->setCheck([](double least) {
+        return least < 0.0 || least > 1.0 ? tr("a coherence is from 0 to 1") : QString();
+    });
+    form_->addRow(tr("Leave out below coherence"), coherence_);
     for (QSpinBox* box : {integrators_, unstablePoles_}) {
         box->setRange(0, mostPoles);
     }
@@ -163,6 +169,8 @@ void ImportForm::setEntry(const ImportChoices& choices, const ImportLook& look) 
     sign_->setChecked(choices.reading.flip_sign);
     const double delay = choices.reading.remove_delay_s;
     delay_->setValue(delay != 0.0 ? std::optional(delay) : std::nullopt);
+    const double least = choices.leastCoherence;
+    coherence_->setValue(least > 0.0 ? std::optional(least) : std::nullopt);
     integrators_->setValue(choices.integrators);
     unstablePoles_->setValue(choices.unstablePoles);
     showRows(choices, look);
@@ -213,6 +221,7 @@ ImportChoices ImportForm::choicesFrom(ImportChoices start) const {
     start.estimate.window = chosen<Window>(window_);
     start.estimate.detrend = chosen<Detrend>(trend_);
     start.quantity = chosen<MeasuredQuantity>(quantity_);
+    start.leastCoherence = coherence_->value().value_or(0.0);
     start.integrators = integrators_->value();
     start.unstablePoles = unstablePoles_->value();
     return start;

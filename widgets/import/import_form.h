@@ -53,6 +53,7 @@ class ImportForm : public QWidget {
     QComboBox* quantity_;
     QCheckBox* sign_;
     QuantityField* delay_;
+    QuantityField* coherence_;
     QSpinBox* integrators_;
     QSpinBox* unstablePoles_;
 };

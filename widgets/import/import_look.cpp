@@ -8,6 +8,7 @@
 #include <QCoreApplication>
 #include <QFileInfo>
 
+#include <algorithm>
 #include <cmath>
 #include <filesystem>
 
@@ -98,6 +99,16 @@ std::optional<MeasuredResponse> responseOf(const QString& path, const ImportChoi
     return edited(std::move(estimate.response), choices.reading);
 }
 
+/// How much of a measurement is more noise than response.
+void tellDoubtful(const MeasuredResponse& response, ImportLook& look) {
+    constexpr double doubtful = 0.5;
+    const auto count = std::ranges::count_if(response.coherence,
+                                             [](double coherence) { return coherence < doubtful; });
+    if (count > 0) {
+        look.understood << tr("%1 points have a coherence below %2").arg(count).arg(doubtful);
+    }
+}
+
 QString quantityRemark(MeasuredQuantity quantity) {
     return quantity == MeasuredQuantity::loop_gain
                ? tr("plant P = L/(C H) from the measured loop gain L")
@@ -126,7 +137,11 @@ ImportLook lookAt(const QString& path, const ImportChoices& choices, const Proje
     ImportLook look;
     try {
         std::optional<MeasuredResponse> response = responseOf(path, choices, proceed, look);
+        if (response && choices.leastCoherence > 0.0) {
+            response = with_least_coherence(*response, choices.leastCoherence);
+        }
         if (response) {
+            tellDoubtful(*response, look);
             const ComplexVector rest = loop_without_plant(project, response->w_rad_s);
             look.plant = std::make_shared<const MeasuredResponse>(
                 plant_from(choices.quantity, std::move(*response), rest));
@@ -154,6 +169,9 @@ QStringList conversionRemarks(const QString& path, const ImportChoices& choices,
         remarks << tr("network parameter %1").arg(toText(reading.parameter));
     }
     remarks << look.understood;
+    if (choices.leastCoherence > 0.0) {
+        remarks << tr("points with a coherence below %1 left out").arg(choices.leastCoherence);
+    }
     if (reading.flip_sign) {
         remarks << tr("sign turned");
     }

@@ -106,6 +106,23 @@ TEST(ResponseEdits, SignAndDelayAreTakenOut) {
     expect_plant(edited(measured, options));
 }
 
+TEST(ResponseEdits, PointsOfLowCoherenceAreLeftOutTogether) {
+    auto measured = sampled(plant_at);
+    measured.coherence[0] = 0.2;
+    measured.coherence[30] = 0.49;
+    measured.coherence[31] = 0.5;
+    const auto kept = with_least_coherence(measured, 0.5);
+    ASSERT_EQ(kept.w_rad_s.size(), measured.w_rad_s.size() - 2);
+    ASSERT_EQ(kept.coherence.size(), kept.w_rad_s.size());
+    EXPECT_EQ(kept.w_rad_s.front(), measured.w_rad_s[1]);
+    EXPECT_EQ(kept.coherence[29], 0.5);
+    EXPECT_EQ(kept.averages, averages);
+    expect_plant(kept);
+    EXPECT_THROW(with_least_coherence(measured, 0.95), InputError);
+    measured.coherence.clear();
+    EXPECT_THROW(with_least_coherence(measured, 0.5), InputError);
+}
+
 TEST(ResponseEdits, RefusesWhatGivesNoPlant) {
     const auto loop = sampled(plant_at);
     auto compensator = compensator_on(loop);
