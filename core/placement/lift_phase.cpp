@@ -3,8 +3,10 @@
 #include "core/numerics/number_text.h"
 #include "core/placement/design_practice.h"
 
+#include <algorithm>
 #include <array>
 #include <cmath>
+#include <functional>
 #include <numbers>
 
 namespace cornerwright {
@@ -104,47 +106,96 @@ Chain with_leads(const Chain& chain, const PlacementLoop& worst, const PhaseLift
     return result;
 }
 
-std::optional<LeadEstimate> lead_for(const PlacementLoop& worst, const PhaseLift& wanted,
+std::optional<LeadEstimate> lead_for(const PlacementLoop& read, const PhaseLift& wanted,
                                      double lift_deg, int sections) {
     LeadEstimate lead{lift_deg, sections, ratio_of(lift_deg), 0.0};
     const auto centre = wanted.crossover_rad_s
                             ? wanted.crossover_rad_s
-                            : falls_through(worst, -0.5 * sections * std::log(lead.ratio));
+                            : falls_through(read, -0.5 * sections * std::log(lead.ratio));
     if (!centre)
         return {};
     lead.centre_rad_s = *centre;
     return lead;
 }
 
-/// The least lift by `sections` leads with which every margin is the wanted one.
-std::optional<LeadEstimate> solved(const PlacementProblem& problem, const PlacementLoop& worst,
-                                   const PhaseLift& wanted, int sections) {
-    const double wanted_deg = wanted.phase_margin_deg;
-    const PlacementProblem judged = with_only(problem, margin_wanted(wanted_deg));
-    // Undetermined (unstable, or no place for the centre) counts as far short.
-    constexpr double far_short = -360.0;
-    const auto excess = [&](double lift_deg) {
-        const auto lead = lead_for(worst, wanted, lift_deg, sections);
-        if (!lead)
-            return far_short;
-        const Figure margin =
-            worst_figure(judged, with_leads(problem.compensator, worst, wanted, *lead));
-        return margin.is_value() ? margin.value() - wanted_deg : far_short;
-    };
-    constexpr double stride_deg = 2.5;
-    constexpr double least_deg = 1e-4; // a lead of no lift at all has no centre
-    double below = least_deg;
-    double excess_below = excess(below);
-    for (double lift = stride_deg; lift <= most_of_one_deg; lift += stride_deg) {
-        const double here = excess(lift);
-        if (here >= 0.0 && excess_below < 0.0)
-            return lead_for(worst, wanted, bracketed_root(excess, below, excess_below, lift, here),
-                            sections);
-        below = lift;
-        excess_below = here;
+/// Solves for the lift with which every margin is the wanted one.
+class LiftSolver {
+  public:
+    LiftSolver(const PlacementProblem& problem, const PlacementLoop& worst, const PhaseLift& wanted)
+        : judged_(with_only(problem, margin_wanted(wanted.phase_margin_deg))),
+          worst_(worst),
+          wanted_(wanted) {}
+
+    Chain chain_with(const LeadEstimate& lead) const {
+        return with_leads(judged_.compensator, worst_, wanted_, lead);
     }
-    return {};
-}
+
+    /// The least lift by `sections` leads: with the centre read off the worst case's curve; where
+    /// that cannot be (cases whose crossovers lie far apart), off the other cases' curves and then
+    /// at places from below the lowest crossover to above the highest.
+    std::optional<LeadEstimate> least(const Evaluation& evaluation, int sections) const {
+        auto lead = least_read_off(worst_, sections);
+        if (lead || wanted_.crossover_rad_s)
+            return lead;
+        double lowest = HUGE_VAL;
+        double highest = 0.0;
+        for (const PlacementLoop& loop : evaluation.loops) {
+            if (&loop != &worst_)
+                lead = smaller(lead, least_read_off(loop, sections));
+            for (const double w : loop.assessment.figures.frequency.crossovers_rad_s) {
+                lowest = std::min(lowest, w);
+                highest = std::max(highest, w);
+            }
+        }
+        constexpr double octave = 2.0;
+        for (double w = lowest / octave; !lead && w <= highest * octave; w *= octave)
+            lead = least_lift([&](double lift_deg) {
+                return LeadEstimate{lift_deg, sections, ratio_of(lift_deg), w};
+            });
+        return lead;
+    }
+
+  private:
+    using Placing = std::function<std::optional<LeadEstimate>(double lift_deg)>;
+
+    static std::optional<LeadEstimate> smaller(std::optional<LeadEstimate> a,
+                                               std::optional<LeadEstimate> b) {
+        return !a || (b && b->lift_deg < a->lift_deg) ? b : a;
+    }
+
+    std::optional<LeadEstimate> least_read_off(const PlacementLoop& loop, int sections) const {
+        return least_lift(
+            [&](double lift_deg) { return lead_for(loop, wanted_, lift_deg, sections); });
+    }
+
+    std::optional<LeadEstimate> least_lift(const Placing& place) const {
+        // Undetermined (unstable, or no place for the centre) counts as far short.
+        constexpr double far_short = -360.0;
+        const auto excess = [&](double lift_deg) {
+            const auto lead = place(lift_deg);
+            if (!lead)
+                return far_short;
+            const Figure margin = worst_figure(judged_, chain_with(*lead));
+            return margin.is_value() ? margin.value() - wanted_.phase_margin_deg : far_short;
+        };
+        constexpr double stride_deg = 2.5;
+        constexpr double least_deg = 1e-4; // a lead of no lift at all has no centre
+        double below = least_deg;
+        double excess_below = excess(below);
+        for (double lift = stride_deg; lift <= most_of_one_deg; lift += stride_deg) {
+            const double here = excess(lift);
+            if (here >= 0.0 && excess_below < 0.0)
+                return place(bracketed_root(excess, below, excess_below, lift, here));
+            below = lift;
+            excess_below = here;
+        }
+        return {};
+    }
+
+    PlacementProblem judged_;
+    const PlacementLoop& worst_;
+    const PhaseLift& wanted_;
+};
 
 std::string pair_words(const LeadEstimate& lead) {
     return "zero at " + number_text(lead.centre_rad_s / std::sqrt(lead.ratio), 4) +
@@ -184,12 +235,12 @@ SectionProposal lift_phase(const PlacementProblem& problem, const PhaseLift& wan
         return impossible(problem, {"The phase margin is " + number_text(present, 4) + " deg on " +
                                     name + ", the worst case: nothing to lift."});
     const auto estimate = lead_estimate(problem, wanted);
+    const LiftSolver solver(problem, *start.loop, wanted);
     for (int sections = estimate ? estimate->sections : 1; sections <= most_sections; ++sections) {
-        const auto lead = solved(problem, *start.loop, wanted, sections);
+        const auto lead = solver.least(evaluation, sections);
         if (!lead)
             continue;
-        SectionProposal proposal{
-            true, with_leads(problem.compensator, *start.loop, wanted, *lead), {}, {}};
+        SectionProposal proposal{true, solver.chain_with(*lead), {}, {}};
         for (std::size_t i = problem.compensator.size(); i < proposal.compensator.size(); ++i)
             proposal.added.push_back(i);
         proposal.words.push_back("The worst case is " + name + " with " + number_text(present, 4) +

@@ -1,15 +1,30 @@
 #include "widgets/design/latest_worker.h"
 
-#include <QThread>
-
+#include <sys/resource.h>
+#include <unistd.h>
 #include <utility>
 
 namespace cornerwright {
 
-LatestWorker::LatestWorker(QObject* parent)
-    : QObject(parent), thread_(QThread::create([this] { work(); })) {
-    thread_->start(QThread::IdlePriority);
+namespace {
+
+/// A tenth of a busy processor at most, yet never nothing: a thread that gets nothing at all could
+/// hold a lock that a frame waits for.
+void standBehind() {
+    constexpr int niceness = 10;
+    // Where the system refuses, the thread runs like any other.
+    setpriority(PRIO_PROCESS, static_cast<id_t>(gettid()), niceness);
 }
+
+} // namespace
+
+LatestWorker::LatestWorker(Haste haste, QObject* parent)
+    : QObject(parent), thread_([this, haste] {
+          if (haste == Haste::behind) {
+              standBehind();
+          }
+          work();
+      }) {}
 
 LatestWorker::~LatestWorker() {
     {
@@ -18,7 +33,7 @@ LatestWorker::~LatestWorker() {
         waiting_.reset();
     }
     wake_.notify_one();
-    thread_->wait();
+    thread_.join();
 }
 
 void LatestWorker::request(Task task) {

@@ -4,17 +4,14 @@
 
 #include <condition_variable>
 #include <functional>
-#include <memory>
 #include <mutex>
 #include <optional>
-
-class QThread;
+#include <thread>
 
 namespace cornerwright {
 
 /// A thread on which the latest task wins: one that is overtaken before its turn is never run, and
-/// what an overtaken one found is thrown away. It runs at the lowest priority, so that it takes no
-/// frame from the hand.
+/// what an overtaken one found is thrown away.
 class LatestWorker : public QObject {
     Q_OBJECT
 
@@ -22,7 +19,12 @@ class LatestWorker : public QObject {
     /// Runs on the thread; what it returns is called on the owner's thread.
     using Task = std::function<std::function<void()>()>;
 
-    explicit LatestWorker(QObject* parent = nullptr);
+    enum class Haste {
+        usual,
+        behind, ///< after everything else that wants a processor, so that no frame waits for it
+    };
+
+    explicit LatestWorker(Haste haste = Haste::usual, QObject* parent = nullptr);
     ~LatestWorker() override;
 
     void request(Task task);
@@ -40,7 +42,7 @@ class LatestWorker : public QObject {
     std::condition_variable wake_;
     std::optional<std::pair<quint64, Task>> waiting_;
     bool stopping_ = false;
-    std::unique_ptr<QThread> thread_;
+    std::thread thread_;
 };
 
 } // namespace cornerwright

@@ -23,7 +23,7 @@ std::vector<double> slopesOf(const Project& project) {
 } // namespace
 
 UphillWatch::UphillWatch(ViewState& viewState, QObject* parent)
-    : QObject(parent), viewState_(viewState) {}
+    : QObject(parent), viewState_(viewState), worker_(LatestWorker::Haste::behind) {}
 
 void UphillWatch::setContent(const PaneContent& content) {
     if (!content.project || content.project == asked_) {

@@ -153,6 +153,19 @@ TEST(SectionDesign, LiftedPhaseIsMetOnTheWorstMeasuredCase) {
     }
 }
 
+TEST(SectionDesign, CasesWithFarCrossoversAreLiftedTogether) {
+    // The slow case has the least margin, but a lead at its crossover brings the fast one down.
+    PlacementProblem problem = with_plants({{"fast", parse_formula("60/(s (s/60 + 1))")},
+                                            {"middle", parse_formula("25/(s (s/40 + 1))")},
+                                            {"slow", parse_formula("9 /(s (s/6.5 + 1))")}},
+                                           {gain_of(1.0)});
+    const double now = worst(problem, at_least(Measure::phase_margin, 1), problem.compensator);
+    const SectionProposal lead = lift_phase(problem, {now + 6.0, 10.0, {}});
+    ASSERT_TRUE(lead.possible) << lead.words.front();
+    EXPECT_NEAR(worst(problem, at_least(Measure::phase_margin, 1), lead.compensator), now + 6.0,
+                0.01);
+}
+
 TEST(SectionDesign, TwoLeadsWhereOneWouldNeedMoreThanSixtyDegrees) {
     const PlacementProblem problem =
         with_plants({{"chain", parse_formula("1/(s^2 (0.05 s + 1))")}}, {gain_of(1.0)});
