@@ -152,6 +152,17 @@ QString limitText(const Requirement& requirement, bool hertz) {
     return {};
 }
 
+QString insideSentence(QString text) {
+    const bool small = QCoreApplication::translate(
+                           "cornerwright", "small",
+                           "how nouns start inside a sentence: translate to small or large") ==
+                       QLatin1String("small");
+    if (small && !text.isEmpty()) {
+        text[0] = text[0].toLower();
+    }
+    return text;
+}
+
 QString measureText(Measure measure) {
     switch (measure) {
     case Measure::phase_margin:

@@ -43,6 +43,9 @@ QString limitText(const Requirement& requirement, bool hertz);
 /// "Phase margin", "Settling time, 2 %", "Rejection up to 1 Hz".
 QString requirementText(const Requirement& requirement, bool hertz);
 QString measureText(Measure measure);
+/// A text that starts with a noun, as it stands inside a sentence: "phase margin", but
+/// "Phasenreserve" in a language that writes nouns large everywhere.
+QString insideSentence(QString text);
 /// "met", "unmet", "not determined".
 QString stateText(State state);
 

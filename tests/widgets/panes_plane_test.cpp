@@ -26,7 +26,8 @@ TEST(NyquistPlane, LeavesTheUnitDiscAloneAndKeepsDirections) {
             if (radius <= 1.0)
                 EXPECT_EQ(drawn, QPointF(value.real(), value.imag()));
             else
-                EXPECT_NEAR(std::hypot(drawn.x(), drawn.y()), 1.0 + std::log(radius), 1e-9);
+                EXPECT_NEAR(std::hypot(drawn.x(), drawn.y()),
+                            1.0 + std::log10(1.0 + (radius - 1.0) * std::numbers::ln10), 1e-9);
             EXPECT_NEAR(std::abs(fromDrawn(drawn, RadiusScale::compressed) - value), 0.0,
                         1e-9 * radius);
             EXPECT_EQ(fromDrawn(toDrawn(value, RadiusScale::linear), RadiusScale::linear), value);
@@ -35,13 +36,23 @@ TEST(NyquistPlane, LeavesTheUnitDiscAloneAndKeepsDirections) {
 
 TEST(NyquistPlane, CompressedAxesSayTheValue) {
     const AxisStyle axis = nyquistAxis(RadiusScale::compressed);
-    const auto ticks = axis.ticks({-6.0, 6.0}, 8);
+    const auto ticks = axis.ticks({-3.6, 3.6}, 8);
     ASSERT_FALSE(ticks.empty());
     QStringList labels;
     for (std::size_t i = 0; i < ticks.size(); ++i)
         labels << axis.label(ticks, i);
     EXPECT_EQ(labels.join(QLatin1Char(' ')),
               QStringLiteral("\u2212100 \u221210 \u22121 0 1 10 100"));
+    const auto wide = axis.ticks({-7.0, 7.0}, 4);
+    EXPECT_LT(wide.size(), 8u);
+    EXPECT_EQ(axis.label(wide, wide.size() - 1), QStringLiteral("10⁶"));
+}
+
+TEST(NyquistPlane, IsSmoothAtTheUnitCircle) {
+    const auto drawn = [](double radius) { return toDrawn(radius, RadiusScale::compressed).x(); };
+    constexpr double step = 1e-6;
+    EXPECT_NEAR((drawn(1.0 + step) - drawn(1.0)) / step, (drawn(1.0) - drawn(1.0 - step)) / step,
+                1e-4);
 }
 
 TEST(NicholsContours, LieWhereTheClosedLoopHasTheirMagnitude) {

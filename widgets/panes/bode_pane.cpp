@@ -175,7 +175,7 @@ std::vector<Handle> BodePane::limitHandles(const MarkedLoop& loop) const {
             handle.at = {mapX().toPixel(mark.w_rad_s),
                          mapY().toPixel(mark.from + handle.id.sub * *requirement.at_least)};
             handle.area = touchArea(handle.at).adjusted(-8.0, 0.0, 8.0, 0.0);
-            handle.name = tr("limit of %1").arg(measureText(mark.measure).toLower());
+            handle.name = tr("limit of %1").arg(insideSentence(measureText(mark.measure)));
             handle.cursor = Qt::SizeVerCursor;
             if (plotArea().contains(handle.at))
                 handles.push_back(std::move(handle));

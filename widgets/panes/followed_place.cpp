@@ -57,7 +57,7 @@ void drawFollowedPlace(QPainter& painter, const QPointF& at, const ViewState& vi
     const QString loop = judgement->loop == LoopName::realised ? FollowedPlace::tr("realised loop")
                                                                : FollowedPlace::tr("design loop");
     const QString text = markOf(judgement->state) + QLatin1Char(' ') +
-                         requirementText(requirement, hertz).toLower() + QLatin1Char(' ') +
+                         insideSentence(requirementText(requirement, hertz)) + QLatin1Char(' ') +
                          figureText(judgement->value, unit_of(requirement.measure), hertz) +
                          QStringLiteral(", ") + loop;
     const LabelStyle style{theme.state(judgement->state), fontOf(FontRole::strong),

@@ -21,7 +21,7 @@ const LoopAssessment* loopOf(const CaseAssessment& shown, LoopName loop);
 enum class RingName { shown, left_out };
 
 /// A ring about the place on a curve where the followed requirement is measured, and what stands
-/// there: "✗ roll-off from 400 Hz −17.2 dB, realised loop".
+/// there: "✗ Roll-off from 400 Hz −17.2 dB, realised loop".
 void drawFollowedPlace(QPainter& painter, const QPointF& at, const ViewState& viewState,
                        const Assessment& assessment, LabelPlacer& placer, const Theme& theme,
                        RingName name = RingName::shown);

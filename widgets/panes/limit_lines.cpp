@@ -25,7 +25,7 @@ LimitText limitTextOf(const Assessment& assessment, const std::string& caseName,
     const State state = stateOf(assessment.verdict, requirement.measure, caseName, LoopName::design)
                             .value_or(State::undetermined);
     return {state, markOf(state) + QLatin1Char(' ') +
-                       requirementText(requirement, hertz).toLower() + QLatin1Char(' ') +
+                       insideSentence(requirementText(requirement, hertz)) + QLatin1Char(' ') +
                        limitText(requirement, hertz)};
 }
 

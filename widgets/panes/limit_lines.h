@@ -16,7 +16,7 @@ std::optional<double> upperLimit(const Project& project, const HandleId& handle)
 std::optional<Project> withUpperLimit(const Project& project, const HandleId& handle, double limit);
 
 /// How a limit stands on the shown case (the design loop), and what is written beside its line:
-/// "✓ sensitivity peak ≤ 6.0 dB".
+/// "✓ Sensitivity peak ≤ 6.0 dB".
 struct LimitText {
     State state = State::undetermined;
     QString text;

@@ -34,7 +34,7 @@ MarginLabel marginLabel(const MarginMark& mark, const MarkedLoop& loop,
                         const Assessment& assessment, const CaseAssessment& shown,
                         const Theme& theme, bool hertz) {
     const auto state = stateOf(assessment.verdict, mark.measure, shown.name, loop.loop);
-    QString text = measureText(mark.measure).toLower() + QLatin1Char(' ') +
+    QString text = insideSentence(measureText(mark.measure)) + QLatin1Char(' ') +
                    figureText(figureOf(mark, loop), unit_of(mark.measure), hertz);
     if (loop.loop == LoopName::realised)
         text += QLatin1Char(' ') + QCoreApplication::translate("MarginLabel", "realised");

@@ -5,7 +5,7 @@
 
 namespace cornerwright {
 
-/// What stands beside a margin that decides: "✗ phase margin 41.9° · unmet", in the colour of its
+/// What stands beside a margin that decides: "✗ Phase margin 41.9° · unmet", in the colour of its
 /// state.
 struct MarginLabel {
     QString text;

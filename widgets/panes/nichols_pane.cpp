@@ -15,7 +15,7 @@ namespace cornerwright {
 namespace {
 
 /// Fitting shows the curve between these sizes, and the endless turns of dead time not at all.
-constexpr AxisRange fitted_db{-40.0, 40.0};
+constexpr AxisRange fitted_db{-30.0, 30.0};
 constexpr AxisRange fitted_degrees{-400.0, 60.0};
 constexpr AxisRange least_degrees{-270.0, -90.0};
 constexpr AxisRange least_db{-20.0, 20.0};
@@ -117,9 +117,9 @@ void NicholsPane::drawContourNames(QPainter& painter) const {
         const QString text = (contour.value > 0.0 ? QStringLiteral("+") : QString()) +
                              numberText(contour.value, 2) + QStringLiteral(" dB");
         const QSizeF room = labelSize(text, font);
-        drawLabel(painter,
-                  placer.place(room, {*at - QPointF(0.5 * room.width(), 0.5 * room.height())}),
-                  text, style, theme());
+        if (const auto place =
+                placer.placeIfFree(room, *at - QPointF(0.5 * room.width(), 0.5 * room.height())))
+            drawLabel(painter, *place, text, style, theme());
     }
 }
 
@@ -231,7 +231,7 @@ void NicholsPane::addLimitHandles(std::vector<Handle>& handles, const MarkedLoop
             handle.at = isSideways(requirements[i]) ? toPixel({mark.from + away, 0.0})
                                                     : toPixel({criticalPhase(*phase), away});
             handle.area = touchArea(handle.at);
-            handle.name = tr("limit of %1").arg(measureText(mark.measure).toLower());
+            handle.name = tr("limit of %1").arg(insideSentence(measureText(mark.measure)));
             handle.cursor = isSideways(requirements[i]) ? Qt::SizeHorCursor : Qt::SizeVerCursor;
             if (plotArea().contains(handle.at))
                 handles.push_back(std::move(handle));

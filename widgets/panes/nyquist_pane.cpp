@@ -45,10 +45,11 @@ NyquistPane::NyquistPane(ViewState& state, QWidget* parent) : LoopPlanePane(stat
         QAction* action = addPaneAction(name, [this, scale = scale] { setRadiusScale(scale); });
         action->setCheckable(true);
         action->setChecked(scale == scale_);
-        action->setToolTip(scale == RadiusScale::compressed
-                               ? tr("Radius beyond 1 drawn as 1 + ln r, so that all of the loop "
-                                    "stays in sight")
-                               : tr("The plane as it is"));
+        action->setToolTip(
+            scale == RadiusScale::compressed
+                ? tr("Radius beyond 1 drawn about one unit a decade, so that all of the loop "
+                     "stays in sight")
+                : tr("The plane as it is"));
         group->addAction(action);
         legend().addSwitch(action);
     }
@@ -79,22 +80,27 @@ std::vector<QPointF> NyquistPane::placesOf(const LoopCurves& curves) const {
 std::optional<PlotRanges> NyquistPane::fittedRanges() const {
     if (!content().assessment)
         return std::nullopt;
-    const bool isCompressed = scale_ == RadiusScale::compressed;
-    const double greatest = isCompressed ? fitted_compressed : fitted_linear;
-    double reach = 1.6; // the critical point with its surroundings
+    const double greatest = scale_ == RadiusScale::compressed ? fitted_compressed : fitted_linear;
+    // The critical point with its surroundings is always there.
+    std::vector<double> real{-1.8, 0.6};
+    std::vector<double> imaginary{-1.1, 1.1};
     for (const CaseAssessment& item : content().assessment->cases)
-        for (const Complex& value : item.design.curves.loop) {
-            const double size = std::abs(value);
-            if (std::isfinite(size) && size > 0.0)
-                reach = std::max(reach, std::abs(toDrawn(std::min(size, greatest), scale_).x()));
-        }
+        for (const Complex& value : item.design.curves.loop)
+            if (std::abs(value) <= greatest) {
+                const QPointF drawn = toDrawn(value, scale_);
+                real.push_back(drawn.x());
+                imaginary.push_back(drawn.y());
+            }
+    const AxisRange x = *rangeOf(real, 0.05, 1.0);
+    const AxisRange y = *rangeOf(imaginary, 0.05, 1.0);
     // The same pixels per unit both ways: circles are circles.
     const double width = std::max(plotArea().width(), 1.0);
     const double height = std::max(plotArea().height(), 1.0);
-    const double perPixel = 2.0 * 1.08 * reach / std::min(width, height);
-    const double halfWidth = 0.5 * perPixel * width;
-    const double halfHeight = 0.5 * perPixel * height;
-    return PlotRanges{{-halfWidth, halfWidth}, {-halfHeight, halfHeight}};
+    const double perPixel = std::max((x.high - x.low) / width, (y.high - y.low) / height);
+    const double middleX = 0.5 * (x.low + x.high);
+    const double middleY = 0.5 * (y.low + y.high);
+    return PlotRanges{{middleX - 0.5 * perPixel * width, middleX + 0.5 * perPixel * width},
+                      {middleY - 0.5 * perPixel * height, middleY + 0.5 * perPixel * height}};
 }
 
 void NyquistPane::drawGround(QPainter& painter) const {
@@ -109,7 +115,9 @@ void NyquistPane::drawGround(QPainter& painter) const {
     if (scale_ == RadiusScale::linear)
         return;
     const QPen ring(theme().colour(ColourRole::grid), 1.0);
-    const double farthest = std::hypot(mapX().range().high, mapY().range().high);
+    const PlotRanges shown = ranges();
+    const double farthest =
+        std::hypot(std::max(-shown.x.low, shown.x.high), std::max(-shown.y.low, shown.y.high));
     for (double radius = 10.0; toDrawn(radius, scale_).x() < farthest; radius *= 10.0)
         drawPath(painter, ring, toPixels(drawnCircle(0.0, radius, scale_)), area);
 }
@@ -228,7 +236,7 @@ Handle NyquistPane::circleHandle(std::size_t requirement, const QPointF& at) con
     handle.id = {HandleKind::limit, requirement, SectionPart::corner, 0};
     handle.at = at;
     handle.area = touchArea(at, 10.0);
-    handle.name = tr("limit of %1").arg(measureText(Measure::sensitivity_peak).toLower());
+    handle.name = tr("limit of %1").arg(insideSentence(measureText(Measure::sensitivity_peak)));
     handle.cursor = Qt::SizeAllCursor;
     return handle;
 }

@@ -10,8 +10,9 @@
 namespace cornerwright {
 
 /// How the complex plane is drawn. Compressed keeps the unit disc as it is and draws the radius r
-/// outside as 1 + ln r, so that an integrator's arm and a resonance stay on the pane; directions
-/// are kept, straight lines past the origin are not.
+/// outside as 1 + lg(1 + (r - 1) ln 10): smooth at the unit circle and, farther out, one unit a
+/// decade, so that an integrator's arm and a resonance stay on the pane. Directions are kept,
+/// straight lines past the origin are not.
 enum class RadiusScale { compressed, linear };
 
 QPointF toDrawn(Complex value, RadiusScale scale);
@@ -20,7 +21,8 @@ Complex fromDrawn(const QPointF& place, RadiusScale scale);
 /// The circle about `centre`, as it is drawn.
 std::vector<QPointF> drawnCircle(Complex centre, double radius, RadiusScale scale);
 
-/// Labels say the value, compressed or not; a compressed axis is divided at powers of ten.
+/// Labels say the value, compressed or not; a compressed axis is divided at powers of ten, at as
+/// many of them as have room.
 AxisStyle nyquistAxis(RadiusScale scale);
 
 } // namespace cornerwright

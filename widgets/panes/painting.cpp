@@ -1,6 +1,8 @@
 #include "widgets/panes/painting.h"
 
 #include <QFontMetricsF>
+#include <QPaintDevice>
+#include <QPaintEngine>
 
 #include <algorithm>
 #include <cmath>
@@ -27,6 +29,47 @@ QPen curvePen(const QColor& colour, double width, Qt::PenStyle style) {
     return pen;
 }
 
+namespace {
+
+/// The curve beside `line`, `distance` pixels to its left.
+QPolygonF besideOf(const QPolygonF& line, double distance) {
+    QPolygonF beside(line);
+    for (qsizetype i = 0; i < line.size(); ++i) {
+        const QPointF along =
+            line[std::min(i + 1, line.size() - 1)] - line[std::max<qsizetype>(i - 1, 0)];
+        const double length = std::hypot(along.x(), along.y());
+        if (length > 0.0)
+            beside[i] += distance / length * QPointF(along.y(), -along.x());
+    }
+    return beside;
+}
+
+/// Raster painting has a short way for pens of one pixel that is some twenty times faster than the
+/// one for all others. A pen of up to two pixels is drawn as two of one, side by side.
+void stroke(QPainter& painter, const QPen& pen, const std::vector<QPolygonF>& lines) {
+    constexpr double narrow = 1.0;
+    constexpr double widest = 2.0;
+    const double width = pen.widthF();
+    const bool isSplit = width > narrow && width <= widest &&
+                         painter.paintEngine()->type() == QPaintEngine::Raster &&
+                         painter.device()->devicePixelRatioF() == 1.0;
+    QPen used = pen;
+    if (isSplit)
+        used.setWidthF(narrow);
+    painter.setPen(used);
+    for (const QPolygonF& line : lines) {
+        if (!isSplit) {
+            painter.drawPolyline(line);
+            continue;
+        }
+        const double aside = 0.5 * (width - narrow);
+        painter.drawPolyline(besideOf(line, aside));
+        painter.drawPolyline(besideOf(line, -aside));
+    }
+}
+
+} // namespace
+
 void drawFunction(QPainter& painter, const QPen& pen, std::span<const double> x,
                   std::span<const double> y, const AxisMap& mapX, const AxisMap& mapY) {
     if (x.size() != y.size() || x.size() < 2)
@@ -41,18 +84,14 @@ void drawFunction(QPainter& painter, const QPen& pen, std::span<const double> x,
     for (std::size_t i = from; i < to; ++i)
         pixels.emplace_back(mapX.toPixel(x[i]),
                             std::clamp(mapY.toPixel(y[i]), -farthest_pixel, farthest_pixel));
-    painter.setPen(pen);
-    for (const QPolygonF& line : thinnedToColumns(pixels))
-        painter.drawPolyline(line);
+    stroke(painter, pen, thinnedToColumns(pixels));
 }
 
 void drawPath(QPainter& painter, const QPen& pen, std::span<const QPointF> pixels,
               const QRectF& area) {
-    painter.setPen(pen);
     constexpr double beyond_edge = 20.0;
     const QRectF clip = area.adjusted(-beyond_edge, -beyond_edge, beyond_edge, beyond_edge);
-    for (const QPolygonF& line : thinnedInPlane(pixels, clip))
-        painter.drawPolyline(line);
+    stroke(painter, pen, thinnedInPlane(pixels, clip));
 }
 
 void drawTriangle(QPainter& painter, const QPointF& at, double size, bool up, const QColor& fill,
@@ -65,21 +104,23 @@ void drawTriangle(QPainter& painter, const QPointF& at, double size, bool up, co
     painter.drawPolygon(corners, 3);
 }
 
+QRectF LabelPlacer::insideOf(const QPointF& corner, const QSizeF& size) const {
+    const double right = std::max(bounds_.left(), bounds_.right() - size.width());
+    const double bottom = std::max(bounds_.top(), bounds_.bottom() - size.height());
+    return {QPointF(std::clamp(corner.x(), bounds_.left(), right),
+                    std::clamp(corner.y(), bounds_.top(), bottom)),
+            size};
+}
+
+bool LabelPlacer::isFree(const QRectF& area) const {
+    return std::none_of(taken_.begin(), taken_.end(),
+                        [&](const QRectF& other) { return other.intersects(area); });
+}
+
 QRectF LabelPlacer::place(const QSizeF& size, std::initializer_list<QPointF> wishes) {
-    const auto inside = [&](QRectF area) {
-        area.moveLeft(std::clamp(area.left(), bounds_.left(),
-                                 std::max(bounds_.left(), bounds_.right() - size.width())));
-        area.moveTop(std::clamp(area.top(), bounds_.top(),
-                                std::max(bounds_.top(), bounds_.bottom() - size.height())));
-        return area;
-    };
-    const auto isFree = [&](const QRectF& area) {
-        return std::none_of(taken_.begin(), taken_.end(),
-                            [&](const QRectF& other) { return other.intersects(area); });
-    };
-    QRectF best = inside(QRectF(*wishes.begin(), size));
+    QRectF best = insideOf(*wishes.begin(), size);
     for (const QPointF& wish : wishes) {
-        const QRectF area = inside(QRectF(wish, size));
+        const QRectF area = insideOf(wish, size);
         if (isFree(area)) {
             best = area;
             break;
@@ -87,6 +128,14 @@ QRectF LabelPlacer::place(const QSizeF& size, std::initializer_list<QPointF> wis
     }
     taken_.push_back(best);
     return best;
+}
+
+std::optional<QRectF> LabelPlacer::placeIfFree(const QSizeF& size, const QPointF& wish) {
+    const QRectF area = insideOf(wish, size);
+    if (!isFree(area))
+        return std::nullopt;
+    taken_.push_back(area);
+    return area;
 }
 
 QSizeF labelSize(const QString& text, const QFont& font) {

@@ -7,6 +7,7 @@
 #include <QPen>
 #include <QString>
 
+#include <optional>
 #include <span>
 #include <vector>
 
@@ -36,8 +37,13 @@ class LabelPlacer {
     /// The first of the wished top-left corners where `size` is free (moved inside the bounds); the
     /// first wish where none is. The place is taken from then on.
     QRectF place(const QSizeF& size, std::initializer_list<QPointF> wishes);
+    /// The same for what can be left out: nothing where the one wish is not free.
+    std::optional<QRectF> placeIfFree(const QSizeF& size, const QPointF& wish);
 
   private:
+    QRectF insideOf(const QPointF& corner, const QSizeF& size) const;
+    bool isFree(const QRectF& area) const;
+
     QRectF bounds_;
     std::vector<QRectF> taken_;
 };

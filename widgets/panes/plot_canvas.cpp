@@ -83,6 +83,8 @@ PlotCanvas::PlotCanvas(QWidget* parent, Paint curves, Paint marks)
     plot_->setObjectName(QStringLiteral("plot"));
     plot_->setMouseTracking(true);
     plot_->setNoAntialiasingOnDrag(false);
+    // All plots of the window are then painted and shown in one go.
+    plot_->setPlottingHint(QCP::phImmediateRefresh, false);
     plot_->addLayer(QStringLiteral("marks"), plot_->layer(QStringLiteral("overlay")),
                     QCustomPlot::limBelow);
     plot_->layer(QStringLiteral("marks"))->setMode(QCPLayer::lmBuffered);
@@ -140,8 +142,8 @@ void PlotCanvas::layOut() {
     // The same margins on every pane, so that frequency axes stacked on one another line up.
     const QFontMetricsF metrics(fontOf(FontRole::small));
     const int line = static_cast<int>(std::ceil(metrics.height()));
-    const int left = static_cast<int>(
-        std::ceil(metrics.horizontalAdvance(QStringLiteral("\u2212180\u00b0 dB"))));
+    const int left =
+        static_cast<int>(std::ceil(metrics.horizontalAdvance(QStringLiteral("\u2212100 rad/s"))));
     plot_->axisRect()->setMargins(QMargins(left, line / 2 + 2, line, line + 8));
 }
 
@@ -162,10 +164,14 @@ void PlotCanvas::setTheme(const Theme& theme) {
 }
 
 void PlotCanvas::redraw() {
+    if (plot_->viewport().isEmpty())
+        return; // a pane without room has nothing to paint on
     plot_->replot(QCustomPlot::rpQueuedReplot);
 }
 
 void PlotCanvas::redrawMarks() {
+    if (plot_->viewport().isEmpty())
+        return;
     plot_->layer(QStringLiteral("marks"))->replot();
 }
 

@@ -58,7 +58,9 @@ PlotPane::PlotPane(ViewState& state, QWidget* parent)
     column->addWidget(plotWidget());
     legend_->hide(); // until a head takes it
     plotWidget()->installEventFilter(this);
-    plotWidget()->setContextMenuPolicy(Qt::NoContextMenu); // the pane's own
+    // The menu is the pane's own, and the plot would keep the event from it.
+    plotWidget()->setContextMenuPolicy(Qt::NoContextMenu);
+    plotWidget()->setAttribute(Qt::WA_NoMousePropagation, false);
     setFocusPolicy(Qt::StrongFocus);
     plotWidget()->setFocusPolicy(Qt::NoFocus);
     canvas_.setTheme(theme());

@@ -20,7 +20,7 @@ namespace {
 constexpr double main_width = 1.5;
 constexpr double thin_width = 1.0;
 constexpr double faint_case = 0.2;
-constexpr AxisRange useful_db{-80.0, 60.0};
+constexpr AxisRange useful_db{-60.0, 60.0};
 
 /// In decibel the product P S is a sum.
 std::vector<double> disturbanceDecibels(const LoopCurves& curves) {
@@ -144,7 +144,7 @@ std::vector<Handle> SensitivityPane::makeHandles() const {
         handle.id = {HandleKind::limit, i, SectionPart::corner, 0};
         handle.at = {0.5 * (left + right), y};
         handle.area = QRectF(left, y - reach, right - left, 2.0 * reach);
-        handle.name = tr("limit of %1").arg(measureText(requirement.measure).toLower());
+        handle.name = tr("limit of %1").arg(insideSentence(measureText(requirement.measure)));
         handle.cursor = Qt::SizeVerCursor;
         handles.push_back(std::move(handle));
     }

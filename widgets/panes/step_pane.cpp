@@ -167,7 +167,7 @@ std::vector<Handle> StepPane::makeHandles() const {
             continue;
         Handle handle;
         handle.id = {HandleKind::limit, i, SectionPart::corner, 0};
-        handle.name = tr("limit of %1").arg(measureText(requirement.measure).toLower());
+        handle.name = tr("limit of %1").arg(insideSentence(measureText(requirement.measure)));
         if (requirement.measure == Measure::overshoot) {
             const double y = mapY().toPixel(*end * (1.0 + *requirement.at_most / 100.0));
             handle.at = {area.left() + 0.75 * area.width(), y};
@@ -237,9 +237,10 @@ void StepPane::drawMarks(QPainter& painter) {
         const QSizeF knob = isOvershoot ? QSizeF(20.0, 7.0) : QSizeF(7.0, 14.0);
         painter.drawRoundedRect(
             QRectF(handle.at - QPointF(0.5 * knob.width(), 0.5 * knob.height()), knob), 3.5, 3.5);
-        const QString text = markOf(state.value_or(State::undetermined)) + QLatin1Char(' ') +
-                             requirementText(requirement, viewState().showsHertz()).toLower() +
-                             QLatin1Char(' ') + limitText(requirement, viewState().showsHertz());
+        const QString text =
+            markOf(state.value_or(State::undetermined)) + QLatin1Char(' ') +
+            insideSentence(requirementText(requirement, viewState().showsHertz())) +
+            QLatin1Char(' ') + limitText(requirement, viewState().showsHertz());
         const LabelStyle style{colour, fontOf(FontRole::strong), LabelGround::pane};
         const QSizeF room = labelSize(text, style.font);
         drawLabel(
