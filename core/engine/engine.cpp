@@ -1,6 +1,7 @@
 #include "core/engine/engine.h"
 
 #include "core/loop/loop_assessment.h"
+#include "core/loop/sampled_plant.h"
 #include "core/numerics/error.h"
 
 #include <algorithm>
@@ -37,6 +38,9 @@ struct RealisedKey {
 struct CaseKeys {
     DesignKey design;
     std::optional<RealisedKey> realised;
+    /// The sampled plant of `realised`, which an edit of the compensator leaves alone; null where
+    /// it has none.
+    std::shared_ptr<const SampledPlants> sampled;
 };
 
 struct EquationKey {
@@ -117,8 +121,11 @@ struct Engine::Memory {
                                const FigureRequest& request, CaseKeys& keys);
     void assess_design(const Project& project, std::size_t index, const DesignKey& key,
                        CaseAssessment& result) const;
-    void assess_realised(const Project& project, std::size_t index, const RealisedKey& key,
+    void assess_realised(const Project& project, std::size_t index, CaseKeys& keys,
                          CaseAssessment& result) const;
+    /// The sampled plant of the last assessment, if it is still that of `key`.
+    std::shared_ptr<const SampledPlants> remembered_samples(std::size_t index,
+                                                            const RealisedKey& key) const;
     /// The last result of the case now at `index`, if there is one.
     const CaseAssessment* remembered(std::size_t index) const;
 };
@@ -153,9 +160,22 @@ void Engine::Memory::assess_design(const Project& project, std::size_t index, co
     }
 }
 
-void Engine::Memory::assess_realised(const Project& project, std::size_t index,
-                                     const RealisedKey& key, CaseAssessment& result) const {
+std::shared_ptr<const SampledPlants>
+Engine::Memory::remembered_samples(std::size_t index, const RealisedKey& key) const {
+    if (!remembered(index) || !case_keys[index].realised)
+        return nullptr;
+    const RealisedKey& before = *case_keys[index].realised;
+    const bool same = before.plant == key.plant &&
+                      before.computation_delay_s == key.computation_delay_s &&
+                      before.equation.sample_period_s == key.equation.sample_period_s;
+    return same ? case_keys[index].sampled : nullptr;
+}
+
+void Engine::Memory::assess_realised(const Project& project, std::size_t index, CaseKeys& keys,
+                                     CaseAssessment& result) const {
+    const RealisedKey& key = *keys.realised;
     const CaseAssessment* before = remembered(index);
+    keys.sampled = remembered_samples(index, key);
     if (before && before->realised && case_keys[index].realised == key) {
         result.realised = before->realised;
         return;
@@ -165,8 +185,11 @@ void Engine::Memory::assess_realised(const Project& project, std::size_t index,
         return;
     }
     try {
-        result.realised = assess_loop(
-            realised_loop_of(project, project.plant_cases[index], key.equation), key.request);
+        RealisedLoop loop = realised_loop_of(project, project.plant_cases[index], key.equation);
+        if (!keys.sampled && std::holds_alternative<PlantModel>(loop.plant))
+            keys.sampled = sampled_plants_of(loop);
+        loop.sampled = keys.sampled;
+        result.realised = assess_loop(loop, key.request);
     } catch (const InputError& error) {
         result.realised = undetermined_loop(key.request, error.what());
     }
@@ -188,7 +211,7 @@ CaseAssessment Engine::Memory::assess_case(const Project& project, std::size_t i
     CaseAssessment result = case_header(plant_case);
     assess_design(project, index, keys.design, result);
     if (keys.realised)
-        assess_realised(project, index, *keys.realised, result);
+        assess_realised(project, index, keys, result);
     else if (project.realisation)
         result.realised = undetermined_loop(request, equation.problem);
     return result;

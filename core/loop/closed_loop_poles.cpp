@@ -93,11 +93,10 @@ ClosedLoopPoles closed_loop_poles(const DesignLoop& loop, const ComplexVector& w
 }
 
 ClosedLoopPoles closed_loop_poles(const RealisedLoop& loop, const ComplexVector& warm_start) {
-    const auto* plant = std::get_if<PlantModel>(&loop.plant);
-    if (plant == nullptr)
+    if (!std::holds_alternative<PlantModel>(loop.plant))
         return {{}, {}, true, "a measured plant has no poles in z"};
-    const SampledPlant sampled =
-        sample_plant(*plant, loop.computation_delay_s, loop.compensator.sample_period_s);
+    const std::shared_ptr<const SampledPlants> plants = sampled_plants_of(loop);
+    const SampledPlant& sampled = plants->delayed;
     const RootForm open = roots_in_z_minus_1(loop.compensator) * sampled.delta_form;
     // z^whole_samples = (d + 1)^whole_samples with d = z - 1.
     const FactoredSum sum({open.poles, -1.0, sampled.whole_samples}, {open.zeros}, open.gain);

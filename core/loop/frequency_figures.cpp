@@ -124,10 +124,7 @@ FrequencyAssessment assess_frequency(const RealisedLoop& loop, const FigureReque
             std::move(stability),
             hidden_factor(known_roots(compensator, *measured), RootPlane::z_minus_1));
     } else {
-        const double period = loop.compensator.sample_period_s;
-        const SampledPlant sampled =
-            sample_plant(std::get<PlantModel>(loop.plant), loop.computation_delay_s, period);
-        const RootForm roots = compensator * sampled.delta_form;
+        const RootForm roots = compensator * sampled_plants_of(loop)->delayed.delta_form;
         stability =
             with_hidden_factor(std::move(stability), hidden_factor(roots, RootPlane::z_minus_1));
     }

@@ -11,6 +11,8 @@
 
 namespace cornerwright {
 
+struct SampledPlants;
+
 /// A plant of which only points are known. What lies below the first frequency is told by
 /// `integrators`; `unstable_poles` are those right of the axis.
 struct MeasuredPlant {
@@ -37,6 +39,9 @@ struct RealisedLoop {
     DifferenceEquation compensator; ///< carries the sample period
     LoopPlant plant;
     double computation_delay_s = 0.0;
+    /// Of just this plant, delay and period, where somebody has them already: sampling costs more
+    /// than the figures that need it.
+    std::shared_ptr<const SampledPlants> sampled = nullptr;
 };
 
 } // namespace cornerwright

@@ -2,6 +2,7 @@
 
 #include "core/loop/closed_loop_poles.h"
 #include "core/loop/frequency_figures.h"
+#include "core/loop/sampled_plant.h"
 #include "core/loop/step_response.h"
 
 #include <type_traits>
@@ -63,7 +64,11 @@ LoopAssessment assess_loop(const DesignLoop& loop, const FigureRequest& request)
 }
 
 LoopAssessment assess_loop(const RealisedLoop& loop, const FigureRequest& request) {
-    return assess_any(loop, request);
+    if (loop.sampled || !std::holds_alternative<PlantModel>(loop.plant))
+        return assess_any(loop, request);
+    RealisedLoop with_samples = loop;
+    with_samples.sampled = sampled_plants_of(loop);
+    return assess_any(with_samples, request);
 }
 
 LoopAssessment undetermined_loop(const FigureRequest& request, const std::string& reason) {

@@ -16,7 +16,7 @@ std::unique_ptr<LoopCurve> loop_curve(const RealisedLoop& loop,
                                       const ComplexVector& closed_loop_poles_z) {
     if (const auto* measured = std::get_if<MeasuredPlant>(&loop.plant))
         return measured_curve(loop, *measured);
-    return model_curve(loop, std::get<PlantModel>(loop.plant), closed_loop_poles_z);
+    return model_curve(loop, closed_loop_poles_z);
 }
 
 } // namespace cornerwright

@@ -297,11 +297,12 @@ std::unique_ptr<LoopCurve> model_curve(const DesignLoop& loop, const PlantModel&
     return std::make_unique<ModelCurve>(std::move(f), closed_loop_poles);
 }
 
-std::unique_ptr<LoopCurve> model_curve(const RealisedLoop& loop, const PlantModel& plant,
+std::unique_ptr<LoopCurve> model_curve(const RealisedLoop& loop,
                                        const ComplexVector& closed_loop_poles_z) {
     const double period = loop.compensator.sample_period_s;
     const RootForm compensator = roots_in_z_minus_1(loop.compensator);
-    const SampledPlant sampled = sample_plant(plant, loop.computation_delay_s, period);
+    const std::shared_ptr<const SampledPlants> plants = sampled_plants_of(loop);
+    const SampledPlant& sampled = plants->delayed;
     Functions f;
     f.compensator_roots = on_bilinear_axis(compensator);
     f.plant_roots = on_bilinear_axis(sampled.delta_form);

@@ -9,7 +9,7 @@ std::unique_ptr<LoopCurve> model_curve(const DesignLoop& loop, const PlantModel&
                                        const ComplexVector& closed_loop_poles);
 
 /// On (0, pi/Ts], with the exact sampled plant. Throws InputError as `sample_plant` does.
-std::unique_ptr<LoopCurve> model_curve(const RealisedLoop& loop, const PlantModel& plant,
+std::unique_ptr<LoopCurve> model_curve(const RealisedLoop& loop,
                                        const ComplexVector& closed_loop_poles_z);
 
 } // namespace cornerwright

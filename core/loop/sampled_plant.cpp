@@ -140,6 +140,23 @@ SampledPlant sample_plant(const PlantModel& plant, double computation_delay_s,
     return result;
 }
 
+SampledPlants sample_plants(const PlantModel& plant, double computation_delay_s,
+                            double sample_period_s) {
+    SampledPlants result;
+    result.delayed = sample_plant(plant, computation_delay_s, sample_period_s);
+    result.undelayed =
+        computation_delay_s == 0.0 ? result.delayed : sample_plant(plant, 0.0, sample_period_s);
+    return result;
+}
+
+std::shared_ptr<const SampledPlants> sampled_plants_of(const RealisedLoop& loop) {
+    if (loop.sampled)
+        return loop.sampled;
+    return std::make_shared<const SampledPlants>(sample_plants(std::get<PlantModel>(loop.plant),
+                                                               loop.computation_delay_s,
+                                                               loop.compensator.sample_period_s));
+}
+
 Complex evaluate(const SampledPlant& plant, Complex z_minus_1) {
     return evaluate(plant.delta_form, z_minus_1) * std::pow(1.0 + z_minus_1, -plant.whole_samples);
 }

@@ -1,7 +1,10 @@
 #pragma once
 
+#include "core/loop/loop.h"
 #include "core/numerics/root_form.h"
 #include "core/plant/plant_case.h"
+
+#include <memory>
 
 namespace cornerwright {
 
@@ -22,6 +25,19 @@ struct SampledPlant {
 /// sampled just after each instant's delay).
 SampledPlant sample_plant(const PlantModel& plant, double computation_delay_s,
                           double sample_period_s);
+
+/// The sampled plants that the figures of a realised loop ask for.
+struct SampledPlants {
+    SampledPlant delayed;   ///< behind dead time and computation delay
+    SampledPlant undelayed; ///< behind the dead time alone, as a disturbance meets it
+};
+
+SampledPlants sample_plants(const PlantModel& plant, double computation_delay_s,
+                            double sample_period_s);
+
+/// Those of a loop whose plant is a model: `loop.sampled` where it is filled, else sampled now.
+/// Throws as `sample_plant` does.
+std::shared_ptr<const SampledPlants> sampled_plants_of(const RealisedLoop& loop);
 
 /// P_d at z = 1 + d.
 Complex evaluate(const SampledPlant& plant, Complex z_minus_1);

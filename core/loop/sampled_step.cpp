@@ -159,8 +159,8 @@ class TailModes {
 TailModes::TailModes(const SampledLoop& loop, const ComplexVector& poles_z,
                      const SteadyValues& steady)
     : period_s_(loop.sample_period_s), steady_(steady) {
-    const SampledPlant plant = sample_plant(loop.plant, loop.computation_delay_s, period_s_);
-    const SampledPlant undelayed = sample_plant(loop.plant, 0.0, period_s_);
+    const SampledPlant& plant = loop.sampled->delayed;
+    const SampledPlant& undelayed = loop.sampled->undelayed;
     RootForm open = loop.compensator * plant.delta_form;
     const ComplexVector common = take_common_roots(open, same_place);
     for (const Complex& z : poles_z) {
@@ -276,8 +276,7 @@ std::optional<StepSignals> sampled_step(const SampledLoop& loop, const ComplexVe
     Run reference(plant, compensator, period, control, dead_time, 1.0, 0.0);
     Run disturbance(plant, compensator, period, control, dead_time, 0.0, 1.0);
 
-    const SteadyValues steady =
-        steady_values(loop.compensator, sample_plant(loop.plant, 0.0, period).delta_form);
+    const SteadyValues steady = steady_values(loop.compensator, loop.sampled->undelayed.delta_form);
     const TailModes modes(loop, poles_z, steady);
 
     StepSignals signals;

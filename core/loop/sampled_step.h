@@ -1,5 +1,6 @@
 #pragma once
 
+#include "core/loop/sampled_plant.h"
 #include "core/loop/step_figures.h"
 #include "core/plant/plant_case.h"
 
@@ -11,6 +12,7 @@ struct SampledLoop {
     PlantModel plant;
     double computation_delay_s = 0.0;
     double sample_period_s = 0.0;
+    std::shared_ptr<const SampledPlants> sampled; ///< of that plant, delay and period
 };
 
 /// Step signals of the sampled loop: the difference equation at the sampling instants, the plant

@@ -54,14 +54,22 @@ DelayedLoop delayed(const DesignLoop& loop, const PlantModel& plant) {
 constexpr const char* no_history =
     "the response behind the dead time could not be followed until it settles";
 
-SampledLoop sampled(const RealisedLoop& loop, const PlantModel& plant) {
-    return {roots_in_z_minus_1(loop.compensator), plant, loop.computation_delay_s,
-            loop.compensator.sample_period_s};
+/// The loop itself, or of a measured plant the one through its fit.
+RealisedLoop modelled(const RealisedLoop& loop, const PlantModel& plant) {
+    if (std::holds_alternative<PlantModel>(loop.plant))
+        return loop;
+    return {loop.compensator, plant, loop.computation_delay_s};
 }
 
-/// Of a measured plant no poles in z are handed over: those of its fit serve.
-ComplexVector poles_through_fit(const RealisedLoop& loop, const PlantModel& plant) {
-    return closed_loop_poles(RealisedLoop{loop.compensator, plant, loop.computation_delay_s}).poles;
+/// `loop` of a model plant. Without poles its own serve.
+std::optional<StepSignals> signals_of(RealisedLoop loop, const ComplexVector& poles_z,
+                                      double until_s = 0.0) {
+    loop.sampled = sampled_plants_of(loop);
+    const SampledLoop sampled{roots_in_z_minus_1(loop.compensator),
+                              std::get<PlantModel>(loop.plant), loop.computation_delay_s,
+                              loop.compensator.sample_period_s, loop.sampled};
+    return sampled_step(sampled, poles_z.empty() ? closed_loop_poles(loop).poles : poles_z,
+                        until_s);
 }
 
 constexpr const char* no_samples = "the sampled response could not be followed until it settles";
@@ -102,9 +110,8 @@ TimeAssessment assess_time(const RealisedLoop& loop, const FigureRequest& reques
     const TimePlant plant = time_plant(loop.plant);
     if (plant.model == nullptr)
         return without(request, no_fit);
-    const std::optional<StepSignals> signals = sampled_step(
-        sampled(loop, *plant.model),
-        closed_loop_poles_z.empty() ? poles_through_fit(loop, *plant.model) : closed_loop_poles_z);
+    const std::optional<StepSignals> signals =
+        signals_of(modelled(loop, *plant.model), closed_loop_poles_z);
     return signals ? assessed(*signals, request, plant.note) : without(request, no_samples);
 }
 
@@ -113,7 +120,7 @@ StepCurves step_curves(const RealisedLoop& loop, double until_s, int points) {
     if (plant.model == nullptr)
         return {{}, {}, {}, {}, no_fit};
     const std::optional<StepSignals> signals =
-        sampled_step(sampled(loop, *plant.model), poles_through_fit(loop, *plant.model), until_s);
+        signals_of(modelled(loop, *plant.model), {}, until_s);
     if (!signals)
         return {{}, {}, {}, {}, no_samples};
     StepCurves curves = curves_at(*signals, even_times(until_s, points));
