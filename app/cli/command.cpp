@@ -1,12 +1,9 @@
 #include "app/cli/command.h"
 
 #include "core/numerics/number_text.h"
-#include "core/numerics/sha256.h"
 
 #include <algorithm>
-#include <fstream>
 #include <iostream>
-#include <iterator>
 
 namespace cornerwright::cli {
 
@@ -15,11 +12,6 @@ Project load_telling_notices(const std::string& file) {
     for (const std::string& notice : loaded.notices)
         std::cerr << file << ": " << notice << '\n';
     return std::move(loaded.project);
-}
-
-std::string sha256_of_file(const std::string& file) {
-    std::ifstream stream(file, std::ios::binary);
-    return sha256_hex(std::string(std::istreambuf_iterator<char>(stream), {}));
 }
 
 const PlantCase& case_named(const Project& project, const std::string& name) {

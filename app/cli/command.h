@@ -45,9 +45,6 @@ void add_report(CLI::App& program, int& status);
 /// Loads a project and tells its notices on standard error.
 Project load_telling_notices(const std::string& file);
 
-/// SHA-256 of the project file as it stands, for what is made from it.
-std::string sha256_of_file(const std::string& file);
-
 /// The plant case called `name`. Throws UsageError that lists the names there are.
 const PlantCase& case_named(const Project& project, const std::string& name);
 

@@ -3,6 +3,7 @@
 #include "core/handover/handover.h"
 #include "core/handover/report_tables.h"
 #include "core/numerics/error.h"
+#include "core/project/load_measurement.h"
 
 #include <array>
 #include <filesystem>

@@ -191,6 +191,24 @@ TEST(ReportCommand, SameProjectSameBytesUnlessADateIsAsked) {
     EXPECT_THAT(text_of(folder / "one.html"), Not(HasSubstr("Printed")));
 }
 
+TEST(ReportCommand, WritesPdfThroughTheWindowProgram) {
+    const Folder folder;
+    folder.write("axis.json", project);
+    const Outcome outcome = folder.run("report axis.json --to one.pdf");
+    ASSERT_EQ(outcome.status, 0) << outcome.err;
+    EXPECT_EQ(outcome.out, "one.pdf\n");
+    EXPECT_THAT(text_of(folder / "one.pdf"), StartsWith("%PDF-"));
+    folder.run("report axis.json --to two.pdf");
+    EXPECT_EQ(text_of(folder / "one.pdf"), text_of(folder / "two.pdf"));
+
+    folder.write("broken.json", "{");
+    const Outcome broken = folder.run("report broken.json --to broken.pdf");
+    EXPECT_EQ(broken.status, 65);
+    EXPECT_THAT(broken.err, HasSubstr("broken.json, line 1"));
+    EXPECT_EQ(folder.run("report axis.json --to no/such/folder/one.pdf").status, 74);
+    EXPECT_FALSE(fs::exists(folder / "broken.pdf"));
+}
+
 TEST(ReportCommand, HasTheExitStatusesOfThePage) {
     const Folder folder;
     folder.write("axis.json", project);
