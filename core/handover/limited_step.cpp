@@ -125,4 +125,23 @@ LimitedStep limited_step(const Project& project, const PlantCase& plant_case,
     return step;
 }
 
+LimitedStep limited_step(const Project& project, const Assessment& assessment,
+                         std::size_t case_index) {
+    constexpr double longer_with_limit = 3.0;
+    constexpr double samples_if_unknown = 1000.0;
+    constexpr double most_shown = 20000.0; // samples: more than any screen or page has places for
+    const double period = assessment.equation->sample_period_s;
+    double final_value = 1.0;
+    double until = samples_if_unknown * period;
+    if (const auto& realised = assessment.cases[case_index].realised) {
+        const Figure& error = realised->figures.steady_state_error.step;
+        if (error.is_value())
+            final_value = 1.0 - error.value();
+        if (!realised->step.t_s.empty())
+            until = longer_with_limit * realised->step.t_s.back();
+    }
+    return limited_step(project, project.plant_cases[case_index], *assessment.equation, final_value,
+                        std::min(until, most_shown * period));
+}
+
 } // namespace cornerwright

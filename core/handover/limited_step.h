@@ -1,5 +1,6 @@
 #pragma once
 
+#include "core/engine/assessment.h"
 #include "core/numerics/figure.h"
 #include "core/project/project.h"
 #include "core/realisation/difference_equation.h"
@@ -26,5 +27,10 @@ struct LimitedStep {
 /// realised step error of 0 makes it 1); `until_s` how far to go, at most a million samples.
 LimitedStep limited_step(const Project& project, const PlantCase& plant_case,
                          const DifferenceEquation& equation, double final_value, double until_s);
+
+/// The same for a case of an assessment (which has an equation), over three times the stretch on
+/// which its realised step is drawn, at most 20000 samples.
+LimitedStep limited_step(const Project& project, const Assessment& assessment,
+                         std::size_t case_index);
 
 } // namespace cornerwright

@@ -75,17 +75,6 @@ std::string list_of(const std::vector<std::string>& lines) {
     return list + "</ul>\n";
 }
 
-/// Where the loop without limits ends up and how long its step is drawn.
-LimitedStep limited_step_of(const Project& project, const Assessment& assessment,
-                            std::size_t index) {
-    constexpr double longer_with_limit = 3.0;
-    const LoopAssessment& realised = *assessment.cases[index].realised;
-    const Figure& error = realised.figures.steady_state_error.step;
-    const double drawn = realised.step.t_s.empty() ? 0.0 : realised.step.t_s.back();
-    return limited_step(project, project.plant_cases[index], *assessment.equation,
-                        error.is_value() ? 1.0 - error.value() : 1.0, longer_with_limit * drawn);
-}
-
 std::string settling_words(const LimitedStep& step) {
     if (step.settling_time_s == Figure::infinite())
         return "not within " + number_text(step.t_s.back(), 4) + " s";
@@ -100,7 +89,7 @@ std::string limited_step_table(const Project& project, const Assessment& assessm
             continue;
         LimitedStep step;
         try {
-            step = limited_step_of(project, assessment, i);
+            step = limited_step(project, assessment, i);
         } catch (const InputError& unusable) {
             step.note = unusable.what();
         }

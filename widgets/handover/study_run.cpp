@@ -2,37 +2,18 @@
 
 #include "core/numerics/error.h"
 
-#include <algorithm>
-
 namespace cornerwright {
 
 namespace {
 
 constexpr int restBeforeWork = 300; // ms without a further edit
 
-/// The realised step is drawn to where it has settled; with a limit it takes longer.
-constexpr double longerWithLimit = 3.0;
-constexpr double untilIfUnknown = 1000.0; // samples
-constexpr double longestShown = 20000.0;  // samples: more than any screen has places for
-
 LimitedStep stepOf(const StudyWish& wish) {
     const Assessment& assessment = *wish.assessment;
     if (!assessment.equation || wish.shown_case >= assessment.cases.size()) {
         return {};
     }
-    const std::optional<LoopAssessment>& realised = assessment.cases[wish.shown_case].realised;
-    double finalValue = 1.0;
-    double until = untilIfUnknown * assessment.equation->sample_period_s;
-    if (realised) {
-        const Figure& error = realised->figures.steady_state_error.step;
-        finalValue = error.is_value() ? 1.0 - error.value() : finalValue;
-        if (!realised->step.t_s.empty()) {
-            until = longerWithLimit * realised->step.t_s.back();
-        }
-    }
-    until = std::min(until, longestShown * assessment.equation->sample_period_s);
-    return limited_step(*wish.project, wish.project->plant_cases[wish.shown_case],
-                        *assessment.equation, finalValue, until);
+    return limited_step(*wish.project, assessment, wish.shown_case);
 }
 
 } // namespace

@@ -105,8 +105,8 @@ TEST(Report, TellsVerdictCautionsCostsAndLimits) {
         }
     }
     for (const char* part :
-         {"L1 bound", "Rounding noise", "limit cycle", "largest relative pole error",
-          "smallest fraction_bits", "Step with output limits", "Time at a limit"})
+         {"L1 bound", "Rounding noise", "limit cycle", "Largest relative pole error",
+          "Smallest fraction_bits", "Step with output limits", "Time at a limit"})
         EXPECT_THAT(report, HasSubstr(part));
 }
 
