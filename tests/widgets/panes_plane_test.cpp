@@ -43,9 +43,9 @@ TEST(NyquistPlane, CompressedAxesSayTheValue) {
         labels << axis.label(ticks, i);
     EXPECT_EQ(labels.join(QLatin1Char(' ')),
               QStringLiteral("\u2212100 \u221210 \u22121 0 1 10 100"));
-    const auto wide = axis.ticks({-7.0, 7.0}, 4);
+    const auto wide = axis.ticks({-8.5, 8.5}, 4);
     EXPECT_LT(wide.size(), 8u);
-    EXPECT_EQ(axis.label(wide, wide.size() - 1), QStringLiteral("10⁶"));
+    EXPECT_EQ(axis.label(wide, wide.size() - 1), QStringLiteral("10⁴"));
 }
 
 TEST(NyquistPlane, IsSmoothAtTheUnitCircle) {

@@ -524,6 +524,9 @@ void PlotPane::redraw() {
 }
 
 void PlotPane::redrawMarks() {
+    // Everything is drawn anew soon: at the next repaint, or with the answer to the drag.
+    if (curvesAreOld_ || content_.ghost)
+        return;
     canvas_.redrawMarks();
 }
 

@@ -40,7 +40,10 @@ QualityPane::QualityPane(ViewState& state, QWidget* parent)
     words_->setTextInteractionFlags(Qt::TextSelectableByMouse);
     words_->setContentsMargins(8, 2, 8, 2);
     words_->setAccessibleName(tr("What the measurement file says"));
-    static_cast<QVBoxLayout*>(layout())->insertWidget(0, words_);
+    words_->setSizePolicy(QSizePolicy::Preferred, QSizePolicy::Minimum);
+    auto* column = static_cast<QVBoxLayout*>(layout());
+    column->insertWidget(0, words_);
+    column->setStretchFactor(plotWidget(), 1);
     auto* group = new QActionGroup(this);
     const std::array<std::pair<Quality, QString>, 3> names{
         {{Quality::coherence, tr("coherence")},
