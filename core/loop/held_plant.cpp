@@ -122,16 +122,68 @@ HeldPlant::HeldPlant(const RootForm& plant, double period_s, std::vector<double>
     for (std::size_t i = 0; i + 1 < points.size(); ++i) {
         const bool may_jump = i == 0 || std::find(switches_s.begin(), switches_s.end(),
                                                   points[i]) != switches_s.end();
-        const double length = points[i + 1] - points[i];
-        pieces_.push_back({points[i], length, may_jump, step_of(length)});
+        if (may_jump) {
+            Segment segment;
+            segment.begin_s = points[i];
+            segment.matrix.resize(chain_.order * chain_.order);
+            segment.input.resize(chain_.order);
+            for (std::size_t state = 0; state < chain_.order; ++state)
+                segment.matrix[state * chain_.order + state] = 1.0;
+            segments_.push_back(std::move(segment));
+            ++points_;
+        }
+        Segment& segment = segments_.back();
+        lengthen(segment, step_of(points[i + 1] - points[i]));
+        segment.outlets.push_back(outlet_of(segment, points[i + 1] - segment.begin_s));
+        ++points_;
     }
 }
 
-std::size_t HeldPlant::step_of(double length_s) {
+/// Lower triangular matrices: by.matrix * segment.matrix in its place, the input likewise.
+void HeldPlant::lengthen(Segment& segment, const Step& by) const {
+    const std::size_t order = chain_.order;
+    for (std::size_t i = order; i-- > 0;) {
+        Complex input = by.input[i];
+        for (std::size_t k = 0; k <= i; ++k)
+            input += times(by.matrix[i * order + k], segment.input[k]);
+        segment.input[i] = input;
+        for (std::size_t column = 0; column <= i; ++column) {
+            Complex sum = 0.0;
+            for (std::size_t k = column; k <= i; ++k)
+                sum += times(by.matrix[i * order + k], segment.matrix[k * order + column]);
+            segment.matrix[i * order + column] = sum;
+        }
+    }
+}
+
+HeldPlant::Outlet HeldPlant::outlet_of(const Segment& segment, double after_s) const {
+    const std::size_t order = chain_.order;
+    Outlet outlet;
+    outlet.after_s = after_s;
+    const auto through = [&](const ComplexVector& row, double direct, ComplexVector& on_states,
+                             double& on_input) {
+        on_states.resize(order);
+        on_input = direct + real_product(row, segment.input);
+        for (std::size_t i = 0; i < order; ++i)
+            for (std::size_t k = 0; k <= i; ++k)
+                on_states[k] += times(row[i], segment.matrix[i * order + k]);
+    };
+    through(chain_.output, chain_.direct, outlet.value, outlet.value_input);
+    through(chain_.slope_output, chain_.slope_direct, outlet.slope, outlet.slope_input);
+    return outlet;
+}
+
+std::pair<double, double> HeldPlant::read(const Outlet& outlet, double input,
+                                          const ComplexVector& state) const {
+    return {real_product(outlet.value, state) + outlet.value_input * input,
+            real_product(outlet.slope, state) + outlet.slope_input * input};
+}
+
+const HeldPlant::Step& HeldPlant::step_of(double length_s) {
     constexpr double rounding = 1e-12; // pieces that differ by it are one length
     for (std::size_t i = 0; i < steps_.size(); ++i)
         if (std::abs(steps_[i].length_s - length_s) <= rounding * length_s)
-            return i;
+            return steps_[i];
     const auto order = static_cast<Eigen::Index>(chain_.order);
     // The held input as a state that does not move.
     Eigen::MatrixXcd matrix = Eigen::MatrixXcd::Zero(order + 1, order + 1);
@@ -149,17 +201,16 @@ std::size_t HeldPlant::step_of(double length_s) {
             step.matrix.push_back(exponential(i + 1, k + 1));
     }
     steps_.push_back(std::move(step));
-    return steps_.size() - 1;
+    return steps_.back();
 }
 
-void HeldPlant::advance(const Piece& piece, double input, ComplexVector& state) const {
-    const Step& step = steps_[piece.step];
+void HeldPlant::advance(const Segment& segment, double input, ComplexVector& state) const {
     const std::size_t order = chain_.order;
     // Lower triangular: from the last state up, none is needed once it is overwritten.
     for (std::size_t i = order; i-- > 0;) {
-        Complex sum = step.input[i] * input;
+        Complex sum = segment.input[i] * input;
         for (std::size_t k = 0; k <= i; ++k)
-            sum += times(step.matrix[i * order + k], state[k]);
+            sum += times(segment.matrix[i * order + k], state[k]);
         state[i] = sum;
     }
 }

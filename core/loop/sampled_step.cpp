@@ -62,12 +62,16 @@ class Run {
                 control_points->append(start, control(1), 0.0);
             control_points->append(start, control(0), 0.0);
         }
-        for (const HeldPlant::Piece& piece : plant_.pieces()) {
-            const double input = plant_input(piece.begin_s);
-            if (piece.may_jump)
-                append(start + piece.begin_s, input, y);
-            plant_.advance(piece, input, plant_state_);
-            append(start + piece.begin_s + piece.length_s, input, y);
+        for (const HeldPlant::Segment& segment : plant_.segments()) {
+            const double input = plant_input(segment.begin_s);
+            const double begin = start + segment.begin_s;
+            y.append(begin, plant_.chain().out(plant_state_, input),
+                     plant_.chain().slope(plant_state_, input));
+            for (const HeldPlant::Outlet& outlet : segment.outlets) {
+                const auto [value, slope] = plant_.read(outlet, input, plant_state_);
+                y.append(begin + outlet.after_s, value, slope);
+            }
+            plant_.advance(segment, input, plant_state_);
         }
         ++sample_;
     }
@@ -101,11 +105,6 @@ class Run {
               (1.0 + compensator_.direct * through);
         const double error = reference_ - y_before - through * now;
         compensator_.add_rate(compensator_state_, error);
-    }
-
-    void append(double t, double input, JoinedPoints& y) const {
-        const BlockChain& chain = plant_.chain();
-        y.append(t, chain.out(plant_state_, input), chain.slope(plant_state_, input));
     }
 
     const HeldPlant& plant_;
@@ -303,7 +302,7 @@ std::optional<StepSignals> sampled_step(const SampledLoop& loop, const ComplexVe
         // Known after the first stretch, rather than found out after the last.
         const double needed = std::max(static_cast<double>(samples),
                                        until_s == 0.0 ? modes.samples_of_fast_modes(signals) : 0.0);
-        const bool worn_out = needed * static_cast<double>(plant.pieces().size()) > most_pieces;
+        const bool worn_out = needed * static_cast<double>(plant.points()) > most_pieces;
         if (!told && !worn_out && (until_s == 0.0 || end < until_s))
             continue;
         if (!told && (until_s == 0.0 || end < until_s))
