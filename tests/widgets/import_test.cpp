@@ -300,7 +300,7 @@ TEST_F(ImportTest, ATimeRecordIsRecognisedAndItsUncertaintyTravelsToTheMargins) 
     // A gain with which the loop crosses 0 dB inside the measured band.
     Project slow = window.document().project();
     slow.compensator.resize(1);
-    slow.compensator.front().gain = 0.1;
+    slow.compensator.front().gain = 0.5;
     window.document().apply(slow, QStringLiteral("Lower the gain"));
     window.files().take(
         {QStringLiteral(CORNERWRIGHT_TEST_DATA "/core/measurement/data/records/belt-sweep.csv")});
