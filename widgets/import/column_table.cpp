@@ -89,6 +89,10 @@ void ColumnTable::setLook(const ImportLook& look, ImportChoices::Holds holds) {
     }
     setHorizontalHeaderLabels(numbers);
     showLines(lines, firstRow);
+    const int lineHeight = fontMetrics().height() + 4;
+    for (int row = firstRow; row < rowCount(); ++row) {
+        setRowHeight(row, lineHeight);
+    }
     if (choosable) {
         showChoices(look);
     }

@@ -87,6 +87,7 @@ ImportPanel::ImportPanel(Document& document, ViewState& viewState, QWidget* pare
 
 void ImportPanel::buildLists() {
     list_->setAccessibleName(tr("Files to take in"));
+    list_->setHorizontalScrollBarPolicy(Qt::ScrollBarAlwaysOff);
     words_->setWordWrap(true);
     words_->setAlignment(Qt::AlignTop | Qt::AlignLeft);
     words_->setContentsMargins(8, 4, 8, 4);
@@ -104,6 +105,8 @@ void ImportPanel::buildLists() {
     columns->addWidget(scrolled(form_, tr("What the file does not say")));
     columns->setStretchFactor(1, 1);
     columns->setSizes({280, 760, 330});
+    left->setSizes({300, 400});
+    centre->setSizes({320, 420});
     for (QSplitter* splitter : {left, centre, columns}) {
         splitter->setChildrenCollapsible(false);
     }
