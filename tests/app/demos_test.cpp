@@ -44,7 +44,10 @@ std::set<std::string> cases_that_fail(const json& project, const Folder& folder)
     return failing;
 }
 
-TEST_P(EveryDemo, MeetsItsRequirementsInSomeCasesAndFailsByALittleInAnother) {
+/// The one demo on whose every case every requirement holds.
+constexpr const char* demo_that_holds = "germination-chamber";
+
+TEST_P(EveryDemo, HoldsOnEveryCaseOrFailsByALittleOnOne) {
     json project = json::parse(text_of(demo_file(GetParam())));
     for (json& plant_case : project["plant_cases"]) {
         if (plant_case.contains("measurement")) {
@@ -54,11 +57,12 @@ TEST_P(EveryDemo, MeetsItsRequirementsInSomeCasesAndFailsByALittleInAnother) {
         }
     }
     const std::set<std::string> failing = cases_that_fail(project, folder_);
-    EXPECT_EQ(failing.size(), 1U);
+    const bool holds = GetParam() == std::string(demo_that_holds);
+    EXPECT_EQ(failing.size(), holds ? 0U : 1U);
     EXPECT_GT(project["plant_cases"].size(), failing.size());
 
     const Outcome outcome = run("assess", "--json");
-    EXPECT_EQ(outcome.status, 1);
+    EXPECT_EQ(outcome.status, holds ? 0 : 1);
     for (const json& requirement : json::parse(outcome.out)["requirements"]) {
         if (requirement["state"] == "unmet") {
             EXPECT_GT(requirement["share"], -0.5) << requirement;
