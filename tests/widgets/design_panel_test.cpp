@@ -96,6 +96,15 @@ TEST_F(DesignPanelTest, EscapeAndUndoPutEverythingBack) {
     EXPECT_EQ(project(), edited);
 }
 
+TEST_F(DesignPanelTest, AProposalThatNobodyTookIsNotSaved) {
+    beginLift(68.0);
+    ASSERT_TRUE(panel().isPossible());
+    const QString file = folder.filePath(QStringLiteral("saved.cornerwright.json"));
+    window.document().save(file);
+    EXPECT_EQ(load_project(file.toStdString()).project, smallProject());
+    EXPECT_EQ(project(), smallProject());
+}
+
 TEST_F(DesignPanelTest, SaysWhyItCannotAndChangesNothing) {
     beginLift(170.0);
     EXPECT_FALSE(panel().isPossible());

@@ -74,6 +74,7 @@ QStringList Document::openAsCopy(const QString& path) {
 }
 
 void Document::save(const QString& path) {
+    cancelDrag(); // a proposal that nobody took is not saved
     const QFileInfo info(path);
     const QString folder = info.absolutePath();
     if (folder == folder_) {

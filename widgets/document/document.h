@@ -39,7 +39,8 @@ class Document : public QObject {
     QStringList open(const QString& path);
     /// Opens a project whose file is not to be overwritten (a demo): Save asks for a place.
     QStringList openAsCopy(const QString& path);
-    /// Writes the present value. Throws WriteError; the old file then stands as it was.
+    /// Writes the present value, after a running drag is put back. Throws WriteError; the old file
+    /// then stands as it was.
     void save(const QString& path);
 
     /// One undo step, unless `next` equals the present value. Ends a drag by putting it back first.
