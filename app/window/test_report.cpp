@@ -4,6 +4,9 @@
 #include "app/window/menu_report.h"
 #include "widgets/chain/chain_panel.h"
 #include "widgets/chain/section_card.h"
+#include "widgets/design/design_panel.h"
+#include "widgets/design/run_row.h"
+#include "widgets/design/tolerance_pane.h"
 #include "widgets/fitting/fit_panel.h"
 #include "widgets/help/help_panel.h"
 #include "widgets/import/import_panel.h"
@@ -80,6 +83,17 @@ QJsonArray noticesOf(const NoticeStrip& strip) {
     return notices;
 }
 
+TolerancePane& tolerancePaneOf(MainWindow& window) {
+    return *qobject_cast<TolerancePane*>(window.area().pane(QStringLiteral("tolerance")));
+}
+
+QJsonObject designOf(const DesignPanel& panel) {
+    return {{QStringLiteral("open"), panel.isOpen()},
+            {QStringLiteral("busy"), panel.isBusy()},
+            {QStringLiteral("possible"), panel.isPossible()},
+            {QStringLiteral("words"), panel.words()}};
+}
+
 } // namespace
 
 TestReport::TestReport(MainWindow& window, const QString& file)
@@ -92,6 +106,8 @@ TestReport::TestReport(MainWindow& window, const QString& file)
     connect(&window.live(), &LiveContent::contentChanged, this, soon);
     connect(&window.document(), &Document::historyChanged, this, soon);
     connect(&window.document(), &Document::fileChanged, this, soon);
+    connect(&window.chain().design(), &DesignPanel::changed, this, soon);
+    connect(&tolerancePaneOf(window).row().run(), &BackgroundRun::ended, this, soon);
     connect(&window.measurements().importPanel(), &ImportPanel::refreshed, this, soon);
     connect(&window.measurements().importPanel(), &ImportPanel::closed, this, soon);
     connect(&window.measurements().fitPanel(), &FitPanel::refreshed, this, soon);
@@ -129,6 +145,8 @@ void TestReport::write() {
         window_.help().isVisible() ? window_.help().topic() : QString();
     report[QStringLiteral("window")] = placeOf(window_);
     report[QStringLiteral("ledger")] = ledgerOf(*window_.ledger().model());
+    report[QStringLiteral("design")] = designOf(window_.chain().design());
+    report[QStringLiteral("tolerance")] = tolerancePaneOf(window_).yieldText();
     report[QStringLiteral("notices")] = noticesOf(window_.notices());
     const PaneContent& content = window_.live().content();
     report[QStringLiteral("import")] = importReport(window_.measurements().importPanel());
