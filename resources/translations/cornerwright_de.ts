@@ -1114,6 +1114,18 @@
         <source>Discard</source>
         <translation>Verwerfen</translation>
     </message>
+    <message>
+        <source>Accept changed measurements</source>
+        <translation>Geänderte Messungen annehmen</translation>
+    </message>
+    <message>
+        <source>Shall the project go by the measurement files as they are now?</source>
+        <translation>Soll sich das Projekt nach den Messdateien richten, wie sie jetzt sind?</translation>
+    </message>
+    <message>
+        <source>Ask again</source>
+        <translation>Wieder fragen</translation>
+    </message>
 </context>
 <context>
     <name>cornerwright::FitPanel</name>

@@ -378,5 +378,38 @@ TEST_F(WindowTest, EveryPaneInSightOffersItsCommandsInTheMenu) {
     }
 }
 
+TEST_F(WindowTest, AMeasurementThatChangedIsToldAndAcceptingItIsAChoice) {
+    const auto write = [this](const QString& name, const QByteArray& text) {
+        QFile file(folder.filePath(name));
+        EXPECT_TRUE(file.open(QIODevice::WriteOnly));
+        file.write(text);
+        return file.fileName();
+    };
+    write(QStringLiteral("unit.csv"), "frequency (Hz),magnitude (dB),phase (deg)\n"
+                                      "1,20,-95\n2,14,-100\n5,5,-110\n10,-2,-125\n20,-10,-140\n");
+    const std::string old(64, 'a');
+    Project project = smallProject();
+    project.plant_cases = {{"unit", MeasurementSource{"unit.csv", old, 1, 0, {}, {}, {}}}};
+    const QString path = folder.filePath(QStringLiteral("measured.cornerwright.json"));
+    save_project(project, path.toStdString());
+    const auto pin = [this] {
+        const auto& source = window.document().project().plant_cases.at(0).source;
+        return std::get<MeasurementSource>(source).sha256;
+    };
+    window.files().open(path);
+    EXPECT_TRUE(
+        window.notices().texts().join(QLatin1Char(' ')).contains(QStringLiteral("has changed")));
+    EXPECT_EQ(pin(), old);
+    QCoreApplication::processEvents();
+    ASSERT_NE(choice(QStringLiteral("Accept changed measurements")), nullptr);
+    choice(QStringLiteral("Accept changed measurements"))->click();
+    EXPECT_NE(pin(), old);
+    EXPECT_TRUE(window.files().save());
+    window.files().open(path);
+    QCoreApplication::processEvents();
+    EXPECT_EQ(choice(QStringLiteral("Accept changed measurements")), nullptr);
+    settle();
+}
+
 } // namespace
 } // namespace cornerwright

@@ -139,8 +139,8 @@ void LedgerPanel::showRowMenu(const QPoint& at) {
 void LedgerPanel::fitColumns() {
     // In average characters, so that the columns follow the font and the scale.
     constexpr std::pair<int, int> widths[] = {
-        {LedgerModel::mark, 4},   {LedgerModel::measure, 27},  {LedgerModel::limit, 13},
-        {LedgerModel::worst, 11}, {LedgerModel::headroom, 24}, {LedgerModel::distance, 13},
+        {LedgerModel::mark, 4},   {LedgerModel::measure, 30},  {LedgerModel::limit, 13},
+        {LedgerModel::worst, 11}, {LedgerModel::headroom, 24}, {LedgerModel::distance, 14},
         {LedgerModel::state, 14},
     };
     const QFontMetrics metrics(fontOf(FontRole::strong));

@@ -37,17 +37,10 @@ qsizetype countOf(const Verdict& verdict, State state) {
     });
 }
 
-QString lowerFirst(QString text) {
-    if (!text.isEmpty()) {
-        text[0] = text[0].toLower();
-    }
-    return text;
-}
-
 /// "unit 7, phase margin, 3.1° short"
 QString shortLine(const RequirementResult& result, bool hertz) {
     QStringList parts{QString::fromStdString(result.worst.case_name),
-                      lowerFirst(requirementText(result.requirement, hertz))};
+                      insideSentence(requirementText(result.requirement, hertz))};
     const QString distance = distanceText(result, hertz);
     if (!distance.isEmpty()) {
         parts << distance;

@@ -2,6 +2,7 @@
 
 #include "core/numerics/error.h"
 #include "widgets/document/document.h"
+#include "widgets/document/measurement_paths.h"
 #include "widgets/window/notice_strip.h"
 
 #include <QFileDialog>
@@ -62,9 +63,27 @@ void FileFlow::openNow(const QString& path) {
         for (const QString& sentence : told) {
             notices_.show(NoticeStrip::Kind::information, sentence);
         }
+        if (!told.isEmpty()) {
+            offerNewPins();
+        }
     } catch (const InputError& error) {
         notices_.show(NoticeStrip::Kind::problem, QString::fromUtf8(error.what()), fileTopic);
     }
+}
+
+void FileFlow::offerNewPins() {
+    const Project pinned = pinnedAnew(document_.project(), document_.folder());
+    if (pinned == document_.project()) {
+        return;
+    }
+    const auto accept = [this] {
+        document_.apply(pinnedAnew(document_.project(), document_.folder()),
+                        tr("Accept changed measurements"));
+    };
+    notices_.show(NoticeStrip::Kind::question,
+                  tr("Shall the project go by the measurement files as they are now?"),
+                  QStringLiteral("pins"),
+                  {{tr("Accept changed measurements"), accept}, {tr("Ask again"), [] {}}});
 }
 
 void FileFlow::openDemo(const QString& path) {

@@ -15,7 +15,8 @@ class Document;
 class NoticeStrip;
 
 /// Everything about files: open, save, the question about unsaved changes, recent files, the
-/// recovery copy, which measurement files are wanted. Trouble is told in the notice strip, nothing is lost.
+/// recovery copy, which measurement files are wanted. Trouble is told in the notice strip, nothing
+/// is lost.
 class FileFlow : public QObject {
     Q_OBJECT
 
@@ -53,6 +54,8 @@ class FileFlow : public QObject {
 
   private:
     void openNow(const QString& path);
+    /// A measurement that changed since it was taken in: accepting it is the user's choice.
+    void offerNewPins();
     void offer(const RecoverableProject& found);
 
     Document& document_;
