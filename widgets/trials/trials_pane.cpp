@@ -53,6 +53,8 @@ TrialsPane::TrialsPane(ViewState& viewState, TrialBook& book, QWidget* parent)
     table_->setHorizontalHeaderLabels(
         {tr("measure"), tr("limit"), tr("trial"), tr("now"), tr("change")});
     table_->verticalHeader()->hide();
+    table_->verticalHeader()->setMinimumSectionSize(1);
+    table_->verticalHeader()->setDefaultSectionSize(table_->fontMetrics().height() + 6);
     table_->setFrameShape(QFrame::NoFrame);
     table_->setShowGrid(false);
     table_->setEditTriggers(QAbstractItemView::NoEditTriggers);

@@ -44,6 +44,7 @@ namespace cornerwright {
 namespace {
 
 constexpr QSize firstSize(1600, 950);
+constexpr int helpMargin = 7; // as between the panes
 const QString groundKey = QStringLiteral("ground");
 constexpr std::chrono::milliseconds layoutRest{1000};
 const QString geometryKey = QStringLiteral("geometry");
@@ -123,7 +124,10 @@ void MainWindow::build() {
     auto* middle = new QHBoxLayout;
     middle->setSpacing(0);
     middle->addWidget(pages_, 1);
-    middle->addWidget(help_);
+    auto* helpPlace = new QVBoxLayout;
+    helpPlace->setContentsMargins(0, helpMargin, helpMargin, helpMargin);
+    helpPlace->addWidget(help_);
+    middle->addLayout(helpPlace);
     layout->addLayout(middle, 1);
     layout->addWidget(status_);
     setCentralWidget(whole);
