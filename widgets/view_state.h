@@ -1,7 +1,6 @@
 #pragma once
 
 #include "core/requirements/verdict.h"
-
 #include "widgets/uphill.h"
 
 #include <QObject>

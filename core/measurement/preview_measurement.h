@@ -27,7 +27,7 @@ struct OpenChoice {
 struct Preview {
     enum class Kind { text_table, touchstone, universal_file } kind = Kind::text_table;
     bool time_record = false;   ///< a table of samples over time, which `estimate_response` takes
-    std::vector<RawLine> lines;        ///< the first lines of the file
+    std::vector<RawLine> lines; ///< the first lines of the file
     std::vector<ColumnInfo> columns;   ///< as far as understood; unit empty where it is open
     std::vector<OpenChoice> choices;   ///< empty when nothing is open
     std::optional<ReadResult> result;  ///< the points, when nothing is open and nothing is wrong

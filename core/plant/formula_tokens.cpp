@@ -66,7 +66,8 @@ class Scanner {
         if (result.ec == std::errc::invalid_argument)
             refuse(token, "a number", "\".\"");
         token.text.assign(begin, result.ptr);
-        if (result.ec == std::errc::result_out_of_range || !std::isfinite(static_cast<double>(token.number)))
+        if (result.ec == std::errc::result_out_of_range ||
+            !std::isfinite(static_cast<double>(token.number)))
             refuse(token, "a number of a size that can be computed with", token.text);
         place_ += token.text.size();
     }

@@ -195,8 +195,8 @@ TEST(EstimateOutput, RefusesWhatItCannotEstimate) {
 }
 
 /// 50/(s (0.01 s + 1)), measured with coherence 0.9 and 4 averages: 0.118 of its size, or 6.75 deg,
-/// of random error (Bendat and Piersol). Its phase margin is 65.5 deg at 45.5 rad/s; there the phase
-/// falls 0.322 times as fast as the magnitude, so that the error of the crossover makes it
+/// of random error (Bendat and Piersol). Its phase margin is 65.5 deg at 45.5 rad/s; there the
+/// phase falls 0.322 times as fast as the magnitude, so that the error of the crossover makes it
 /// 6.75 sqrt(1 + 0.322^2) = 7.1 deg.
 std::string scattered_table() {
     std::ostringstream text;

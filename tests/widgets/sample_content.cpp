@@ -11,10 +11,8 @@ PlantCase load(const std::string& name, double resonance, double gain) {
     PlantModel model;
     const double zero = 0.82 * resonance;
     model.roots.zeros = {{-0.02 * zero, zero}, {-0.02 * zero, -zero}};
-    model.roots.poles = {{0.0, 0.0},
-                         {-31.0, 0.0},
-                         {-0.02 * resonance, resonance},
-                         {-0.02 * resonance, -resonance}};
+    model.roots.poles = {
+        {0.0, 0.0}, {-31.0, 0.0}, {-0.02 * resonance, resonance}, {-0.02 * resonance, -resonance}};
     model.roots.gain = gain * 31.0 * resonance * resonance / (zero * zero);
     model.dead_time_s = 0.0004;
     return {name, RootsSource{model}};
@@ -47,8 +45,8 @@ Project servoProject() {
     low_pass.pole_rad_s = 1900.0;
     project.compensator = {gain, pi, lead, notch, low_pass};
     project.sampling = Sampling{0.0005, 0.00025, true};
-    project.realisation = Realisation{Method::tustin_at_corners, 0.0,
-                                      Structure::direct_form_2_transposed, NumberFormat{}, {}};
+    project.realisation = Realisation{
+        Method::tustin_at_corners, 0.0, Structure::direct_form_2_transposed, NumberFormat{}, {}};
     const auto require = [&](Measure measure, std::optional<double> least,
                              std::optional<double> most) {
         Requirement requirement;

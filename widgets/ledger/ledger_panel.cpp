@@ -140,8 +140,8 @@ void LedgerPanel::fitColumns() {
     // In average characters, so that the columns follow the font and the scale.
     constexpr std::pair<int, int> widths[] = {
         {LedgerModel::mark, 4},   {LedgerModel::measure, 30},  {LedgerModel::limit, 13},
-        {LedgerModel::worst, 11}, {LedgerModel::headroom, 24}, {LedgerModel::distance, 14},
-        {LedgerModel::state, 14},
+        {LedgerModel::worst, 11}, {LedgerModel::headroom, 20}, {LedgerModel::distance, 16},
+        {LedgerModel::state, 18},
     };
     const QFontMetrics metrics(fontOf(FontRole::strong));
     for (const auto& [column, characters] : widths) {

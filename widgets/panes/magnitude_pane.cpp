@@ -3,8 +3,8 @@
 #include "widgets/figure_text.h"
 #include "widgets/panes/axis_styles.h"
 #include "widgets/panes/painting.h"
-#include "widgets/panes/uphill_marks.h"
 #include "widgets/panes/section_edit.h"
+#include "widgets/panes/uphill_marks.h"
 #include "widgets/view_state.h"
 
 #include <QMenu>
@@ -174,9 +174,9 @@ void MagnitudePane::drawMarks(QPainter& painter) {
     drawHandles(painter, placer);
     for (const MarginMark& mark : phase.marks)
         if (mark.decides)
-            drawUphillUpright(
-                painter, QPointF(mapX().toPixel(mark.w_rad_s), mapY().toPixel(0.0)), handleSize(),
-                uphillOfGain(viewState().uphill(), project()->compensator), theme());
+            drawUphillUpright(painter, QPointF(mapX().toPixel(mark.w_rad_s), mapY().toPixel(0.0)),
+                              handleSize(),
+                              uphillOfGain(viewState().uphill(), project()->compensator), theme());
     drawFollowed(painter, placer);
     drawWorstNames(painter, placer);
     drawReadings(painter);

@@ -25,7 +25,8 @@ constexpr double ghost_share = 0.5;
 
 RootLocusPane::RootLocusPane(ViewState& state, QWidget* parent) : PlotPane(state, parent) {
     setAccessibleName(title());
-    setAxes(linearAxis(QStringLiteral("rad/s")), linearAxis(QStringLiteral("rad/s")));
+    // Both axes are in rad/s; said once, where there is room for it.
+    setAxes(linearAxis(QStringLiteral("rad/s")), linearAxis({}));
     connect(&state, &ViewState::cursorChanged, this, [this] { redrawMarks(); });
 }
 

@@ -32,9 +32,8 @@ MeasurementFlow::MeasurementFlow(Document& document, ViewState& viewState, Notic
         viewState_.setShownCase(document_.project().plant_cases.size() - 1);
         tell(sentence);
     });
-    connect(import_, &ImportPanel::failed, this, [this](const QString& why) {
-        notices_.show(NoticeStrip::Kind::problem, why, topic);
-    });
+    connect(import_, &ImportPanel::failed, this,
+            [this](const QString& why) { notices_.show(NoticeStrip::Kind::problem, why, topic); });
     // What is on its way in was meant for the project that was open.
     connect(&document_, &Document::projectReplaced, import_, &ImportPanel::dismiss);
     connect(&document_, &Document::projectReplaced, fit_, &FitPanel::dismiss);

@@ -33,7 +33,10 @@ void VerdictPill::setVerdict(const Verdict* verdict, bool hertz) {
 
 QSize VerdictPill::sizeHint() const {
     const QFontMetrics metrics = fontMetrics();
-    return {metrics.horizontalAdvance(markOf(state_) + QStringLiteral("  ") + text()) + 2 * padding,
+    // A character to spare: the mark may come from another font, whose advance is rounded
+    // elsewhere.
+    return {metrics.horizontalAdvance(markOf(state_) + QStringLiteral("  ") + text()) +
+                metrics.averageCharWidth() + 2 * padding,
             metrics.height() + 12};
 }
 
