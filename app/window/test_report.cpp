@@ -131,6 +131,7 @@ void TestReport::write() {
     report[QStringLiteral("number")] = ++number_;
     report[QStringLiteral("busy")] = window_.live().runner().isBusy();
     report[QStringLiteral("modified")] = window_.document().isModified();
+    report[QStringLiteral("proposed")] = window_.document().isDragging();
     report[QStringLiteral("can_undo")] = window_.document().canUndo();
     report[QStringLiteral("file")] = window_.document().filePath();
     report[QStringLiteral("project")] = QString::fromLatin1(

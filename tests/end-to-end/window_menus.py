@@ -1,8 +1,9 @@
 """Takes every entry of every menu with the mouse, in the real program under a virtual screen.
 
 After each entry that edited the project the file is saved and every figure of the ledger compared
-with what the command line says of it; then the edit is taken back. Dialogs that open are closed
-with Escape and must leave the project as it was. No entry may end the program but Quit.
+with what the command line says of it; then the edit is taken back. A proposal
+is put back by Escape. Dialogs that open are closed with Escape and must leave the project as it
+was. No entry may end the program but Quit.
 
 usage: window_menus.py PROGRAM COMMAND_LINE PROJECT
 """
@@ -87,9 +88,10 @@ with tempfile.TemporaryDirectory() as home, Screen() as screen:
     shutil.copy(source, project)
     window = Window(screen, program, project, home)
     menus = Menus(window)
-    everything = [leaf for top in window.report()["menu_bar"] for leaf in menus.leaves([top["text"]])]
+    everything = [leaf for top in window.report()["menu_bar"]
+                  for leaf in menus.leaves([top["text"]])]
     quit_path = next(path for path in everything if path[-1] == LAST)
-    edits = dialogs = not_now = 0
+    edits = proposals = dialogs = not_now = 0
     for path in everything:
         if path in (quit_path, ["File", "New"]) or path[:2] == ["File", "Open recent"]:
             continue  # these leave the project; they come at the end
@@ -106,6 +108,11 @@ with tempfile.TemporaryDirectory() as home, Screen() as screen:
             window.wait("the dialog to close", lambda r: not r["dialog"])
             if window.report()["project"] != before["project"]:
                 sys.exit(f"{path}: a dialog that was closed changed the project")
+        elif after["proposed"]:
+            proposals += 1
+            screen.hand("key", "Escape")
+            window.wait(f"{path} to be put back", lambda r: not r["proposed"] and not r["busy"]
+                        and r["project"] == before["project"])
         elif after["project"] != before["project"]:
             edits += 1
             save_and_compare(window, command_line, project, path)
@@ -122,4 +129,5 @@ with tempfile.TemporaryDirectory() as home, Screen() as screen:
     menus.click(entry_of(entry, LAST))
     window.process.wait(timeout=30)
     print(f"{len(everything)} entries: {edits} edited and agree with the command line, "
-          f"{dialogs} opened a dialog, {not_now} cannot be taken on a fresh project")
+          f"{proposals} proposed and put back, {dialogs} opened a dialog, "
+          f"{not_now} cannot be taken on a fresh project")
