@@ -3,12 +3,8 @@
 #include "core/loop/loop_assessment.h"
 #include "core/loop/sampled_plant.h"
 #include "core/numerics/error.h"
+#include "core/numerics/shared_work.h"
 
-#include <algorithm>
-#include <atomic>
-#include <functional>
-#include <future>
-#include <thread>
 #include <utility>
 
 namespace cornerwright {
@@ -76,24 +72,6 @@ CaseAssessment case_header(const PlantCase& plant_case) {
         header.fitted = measurement->fit.has_value();
     }
     return header;
-}
-
-/// Calls `work` for each index, on every core: each index writes to its own place, so the answer
-/// does not hang on who came first. What `work` throws comes out.
-void for_each_index(std::size_t count, const std::function<void(std::size_t)>& work) {
-    const std::size_t hands =
-        std::min<std::size_t>(count, std::max(1U, std::thread::hardware_concurrency()));
-    std::atomic<std::size_t> next{0};
-    const auto take = [&] {
-        for (std::size_t i = next++; i < count; i = next++)
-            work(i);
-    };
-    std::vector<std::future<void>> others;
-    for (std::size_t hand = 1; hand < hands; ++hand)
-        others.push_back(std::async(std::launch::async, take));
-    take();
-    for (std::future<void>& other : others)
-        other.get();
 }
 
 std::vector<JudgedLoop> judged_loops(const std::vector<CaseAssessment>& cases) {
@@ -232,8 +210,10 @@ std::shared_ptr<const Assessment> Engine::assess(const Project& project) {
     assessment->realisation_problem = outcome.problem;
     std::vector<CaseKeys> keys(project.plant_cases.size());
     assessment->cases.resize(project.plant_cases.size());
-    for_each_index(project.plant_cases.size(), [&](std::size_t i) {
-        assessment->cases[i] = memory_->assess_case(project, i, request, keys[i]);
+    do_shared({project.plant_cases.size(), 0, {}}, [&]() -> WorkOnIndex {
+        return [&](std::size_t i) {
+            assessment->cases[i] = memory_->assess_case(project, i, request, keys[i]);
+        };
     });
     assessment->verdict = judge(project.requirements, request, judged_loops(assessment->cases));
 

@@ -2,14 +2,11 @@
 
 #include "core/measurement/read_measurement.h"
 #include "core/numerics/error.h"
+#include "core/numerics/shared_work.h"
 #include "core/placement/problem.h"
 
 #include <algorithm>
-#include <atomic>
 #include <cctype>
-#include <exception>
-#include <mutex>
-#include <thread>
 #include <utility>
 
 namespace cornerwright {
@@ -67,70 +64,6 @@ FleetUnit unit_of(PlacementProblem& problem, const fs::path& file, const FleetOp
     return unit;
 }
 
-class FleetRun {
-  public:
-    FleetRun(const PlacementProblem& problem, std::vector<fs::path> files,
-             const FleetOptions& options)
-        : problem_(problem),
-          options_(options),
-          files_(std::move(files)),
-          units_(files_.size()),
-          is_done_(files_.size(), 0) {}
-
-    std::vector<FleetUnit> run() {
-        const auto cores = static_cast<int>(std::max(1U, std::thread::hardware_concurrency()));
-        const int workers = options_.workers > 0 ? options_.workers : cores;
-        std::vector<std::thread> threads;
-        for (int i = 1; i < workers; ++i)
-            threads.emplace_back([this] { work(); });
-        work();
-        for (std::thread& thread : threads)
-            thread.join();
-        if (failure_)
-            std::rethrow_exception(failure_);
-        std::vector<FleetUnit> done;
-        for (std::size_t i = 0; i < units_.size(); ++i) {
-            if (is_done_[i])
-                done.push_back(std::move(units_[i]));
-        }
-        return done;
-    }
-
-  private:
-    void work() {
-        try {
-            PlacementProblem problem = problem_;
-            for (std::size_t i = next_++; i < files_.size() && !stopped_; i = next_++) {
-                units_[i] = unit_of(problem, files_[i], options_);
-                is_done_[i] = 1;
-                tell();
-            }
-        } catch (...) {
-            const std::lock_guard lock(mutex_);
-            failure_ = std::current_exception();
-            stopped_ = true;
-        }
-    }
-
-    void tell() {
-        const std::lock_guard lock(mutex_);
-        ++done_;
-        if (options_.proceed && !stopped_ && !options_.proceed(done_, files_.size()))
-            stopped_ = true;
-    }
-
-    const PlacementProblem& problem_;
-    const FleetOptions& options_;
-    std::vector<fs::path> files_;
-    std::vector<FleetUnit> units_;
-    std::vector<char> is_done_; ///< not bool: workers write neighbours at the same time
-    std::atomic<std::size_t> next_{0};
-    std::atomic<bool> stopped_{false};
-    std::mutex mutex_;
-    std::size_t done_ = 0;
-    std::exception_ptr failure_;
-};
-
 } // namespace
 
 std::vector<fs::path> fleet_files(const fs::path& folder) {
@@ -177,7 +110,23 @@ std::vector<FleetUnit> run_fleet(const Project& project, const std::vector<fs::p
     for (auto i = static_cast<std::size_t>(options.shard - 1); i < files.size();
          i += static_cast<std::size_t>(options.shards))
         own.push_back(files[i]);
-    return FleetRun(problem, std::move(own), options).run();
+    std::vector<FleetUnit> units(own.size());
+    std::vector<char> is_done(own.size(), 0); // not bool: workers write neighbours at a time
+    SharedWork work{own.size(), options.workers, {}};
+    if (options.proceed)
+        work.proceed = [&](std::size_t done) { return options.proceed(done, own.size()); };
+    do_shared(work, [&]() -> WorkOnIndex {
+        return [&, of_this_thread = problem](std::size_t i) mutable {
+            units[i] = unit_of(of_this_thread, own[i], options);
+            is_done[i] = 1;
+        };
+    });
+    std::vector<FleetUnit> done;
+    for (std::size_t i = 0; i < units.size(); ++i) {
+        if (is_done[i] != 0)
+            done.push_back(std::move(units[i]));
+    }
+    return done;
 }
 
 } // namespace cornerwright

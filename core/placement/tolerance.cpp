@@ -1,13 +1,10 @@
 #include "core/placement/tolerance.h"
 
 #include "core/numerics/error.h"
+#include "core/numerics/shared_work.h"
 
 #include <algorithm>
-#include <atomic>
 #include <cmath>
-#include <exception>
-#include <mutex>
-#include <thread>
 
 namespace cornerwright {
 namespace {
@@ -38,56 +35,20 @@ SampleOutcome outcome_of(const PlacementProblem& sampled) {
     return outcome;
 }
 
-class ToleranceRun {
-  public:
-    ToleranceRun(const PlacementProblem& problem, const ToleranceOptions& options)
-        : problem_(problem), options_(options), outcomes_(options.samples) {}
-
-    std::vector<SampleOutcome> run(bool& stopped) {
-        const auto cores = static_cast<int>(std::max(1U, std::thread::hardware_concurrency()));
-        const int workers = options_.workers > 0 ? options_.workers : cores;
-        std::vector<std::thread> threads;
-        for (int i = 1; i < workers; ++i)
-            threads.emplace_back([this] { work(); });
-        work();
-        for (std::thread& thread : threads)
-            thread.join();
-        if (failure_)
-            std::rethrow_exception(failure_);
-        stopped = stopped_;
-        return std::move(outcomes_);
-    }
-
-  private:
-    void work() {
-        try {
-            for (std::size_t i = next_++; i < outcomes_.size() && !stopped_; i = next_++) {
-                outcomes_[i] = outcome_of(drawn(problem_, options_.spreads, options_.seed, i));
-                tell();
-            }
-        } catch (...) {
-            const std::lock_guard lock(mutex_);
-            failure_ = std::current_exception();
-            stopped_ = true;
-        }
-    }
-
-    void tell() {
-        const std::lock_guard lock(mutex_);
-        ++done_;
-        if (options_.proceed && !stopped_ && !options_.proceed(done_, outcomes_.size()))
-            stopped_ = true;
-    }
-
-    const PlacementProblem& problem_;
-    const ToleranceOptions& options_;
-    std::vector<SampleOutcome> outcomes_;
-    std::atomic<std::size_t> next_{0};
-    std::atomic<bool> stopped_{false};
-    std::mutex mutex_;
-    std::size_t done_ = 0;
-    std::exception_ptr failure_;
-};
+/// Every sample's outcome; `stopped` tells whether some were never begun.
+std::vector<SampleOutcome> outcomes_of(const PlacementProblem& problem,
+                                       const ToleranceOptions& options, bool& stopped) {
+    std::vector<SampleOutcome> outcomes(options.samples);
+    SharedWork work{outcomes.size(), options.workers, {}};
+    if (options.proceed)
+        work.proceed = [&](std::size_t done) { return options.proceed(done, outcomes.size()); };
+    stopped = !do_shared(work, [&]() -> WorkOnIndex {
+        return [&](std::size_t i) {
+            outcomes[i] = outcome_of(drawn(problem, options.spreads, options.seed, i));
+        };
+    });
+    return outcomes;
+}
 
 void count(State state, std::size_t& met, std::size_t& unmet, std::size_t& undetermined) {
     ++(state == State::met ? met : state == State::unmet ? unmet : undetermined);
@@ -167,7 +128,7 @@ ToleranceResult tolerance(const PlacementProblem& problem, const ToleranceOption
         throw InputError({}, "a spread above 0 %", "none");
     ToleranceResult result;
     result.requirements.resize(problem.requirements.size());
-    const std::vector<SampleOutcome> outcomes = ToleranceRun(problem, options).run(result.stopped);
+    const std::vector<SampleOutcome> outcomes = outcomes_of(problem, options, result.stopped);
     std::optional<std::size_t> worst;
     for (std::size_t i = 0; i < outcomes.size(); ++i) {
         const SampleOutcome& outcome = outcomes[i];
