@@ -15,6 +15,7 @@
 #include "widgets/panes/plot_pane.h"
 #include "widgets/parts/link_button.h"
 #include "widgets/parts/quantity_field.h"
+#include "widgets/placement/placement_run.h"
 #include "widgets/window/main_window.h"
 #include "widgets/window/measurement_flow.h"
 #include "widgets/window/notice_strip.h"
@@ -107,6 +108,8 @@ TestReport::TestReport(MainWindow& window, const QString& file)
     connect(&window.document(), &Document::historyChanged, this, soon);
     connect(&window.document(), &Document::fileChanged, this, soon);
     connect(&window.chain().design(), &DesignPanel::changed, this, soon);
+    connect(&window.placement(), &PlacementRun::finished, this, soon);
+    connect(&window.placement(), &PlacementRun::failed, this, soon);
     connect(&tolerancePaneOf(window).row().run(), &BackgroundRun::ended, this, soon);
     connect(&window.measurements().importPanel(), &ImportPanel::refreshed, this, soon);
     connect(&window.measurements().importPanel(), &ImportPanel::closed, this, soon);
@@ -131,7 +134,7 @@ void TestReport::write() {
     report[QStringLiteral("number")] = ++number_;
     report[QStringLiteral("busy")] = window_.live().runner().isBusy();
     report[QStringLiteral("modified")] = window_.document().isModified();
-    report[QStringLiteral("proposed")] = window_.document().isDragging();
+    report[QStringLiteral("placing")] = window_.placement().isRunning();
     report[QStringLiteral("can_undo")] = window_.document().canUndo();
     report[QStringLiteral("file")] = window_.document().filePath();
     report[QStringLiteral("project")] = QString::fromLatin1(

@@ -79,7 +79,8 @@ def take(menus, path):
         return None
     menus.click(entry)
     return window.wait(f"{path} to be done",
-                       lambda r: not r["open_menus"] and (r["dialog"] or not r["busy"]))
+                       lambda r: not r["open_menus"] and not r["placing"]
+                       and not r["design"]["busy"] and (r["dialog"] or not r["busy"]))
 
 
 program, command_line, source = sys.argv[1:4]
@@ -108,11 +109,12 @@ with tempfile.TemporaryDirectory() as home, Screen() as screen:
             window.wait("the dialog to close", lambda r: not r["dialog"])
             if window.report()["project"] != before["project"]:
                 sys.exit(f"{path}: a dialog that was closed changed the project")
-        elif after["proposed"]:
+        elif after["design"]["open"]:
+            # Left open it would propose anew after every edit that follows, possible or not.
             proposals += 1
             screen.hand("key", "Escape")
-            window.wait(f"{path} to be put back", lambda r: not r["proposed"] and not r["busy"]
-                        and r["project"] == before["project"])
+            window.wait(f"{path} to be put back", lambda r: not r["design"]["open"]
+                        and not r["busy"] and r["project"] == before["project"])
         elif after["project"] != before["project"]:
             edits += 1
             save_and_compare(window, command_line, project, path)
