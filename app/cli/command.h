@@ -17,6 +17,7 @@ enum ExitStatus {
     requirement_undetermined = 2,
     wrong_usage = 64,
     wrong_input = 65,
+    failed_inside = 70, ///< a fault of the program itself, or no memory left
     cannot_write = 74,
 };
 

@@ -25,6 +25,7 @@ constexpr std::array forms{HandoverForm::c99, HandoverForm::structured_text, Han
 
 std::vector<std::string> form_names() {
     std::vector<std::string> names;
+    names.reserve(forms.size());
     for (const HandoverForm form : forms)
         names.emplace_back(name_of(form));
     return names;

@@ -52,6 +52,9 @@ int main(int argc, char** argv) {
     } catch (const cornerwright::WriteError& error) {
         std::cerr << error.what() << '\n';
         return cannot_write;
+    } catch (const std::exception& error) {
+        std::cerr << "the program failed: " << error.what() << '\n';
+        return failed_inside;
     }
     std::cout.flush();
     if (!std::cout) {

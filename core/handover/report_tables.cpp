@@ -262,10 +262,10 @@ std::string requirement_table(const Assessment& assessment) {
                                  result.requirement.at_least.value_or(1.0) != 0.0 &&
                                  result.requirement.at_most.value_or(1.0) != 0.0;
         std::string headroom = figure_words(result.worst.headroom, 3);
-        if (result.worst.headroom.is_value())
-            headroom = logarithmic ? "a factor of " +
-                                         number_text(std::exp(result.worst.headroom.value()), 3)
-                                   : headroom + " " + std::string(symbol_of(unit));
+        if (result.worst.headroom.is_value() && logarithmic)
+            headroom = "a factor of " + number_text(std::exp(result.worst.headroom.value()), 3);
+        else if (result.worst.headroom.is_value())
+            headroom.append(" ").append(symbol_of(unit));
         rows.push_back(
             {escaped(measure_words(result.requirement)), escaped(result.limit),
              with_unit(result.worst.value, unit), place_words(result.worst), headroom,

@@ -181,9 +181,9 @@ std::pair<double, double> HeldPlant::read(const Outlet& outlet, double input,
 
 const HeldPlant::Step& HeldPlant::step_of(double length_s) {
     constexpr double rounding = 1e-12; // pieces that differ by it are one length
-    for (std::size_t i = 0; i < steps_.size(); ++i)
-        if (std::abs(steps_[i].length_s - length_s) <= rounding * length_s)
-            return steps_[i];
+    for (const Step& known : steps_)
+        if (std::abs(known.length_s - length_s) <= rounding * length_s)
+            return known;
     const auto order = static_cast<Eigen::Index>(chain_.order);
     // The held input as a state that does not move.
     Eigen::MatrixXcd matrix = Eigen::MatrixXcd::Zero(order + 1, order + 1);

@@ -180,6 +180,7 @@ void ModelCurve::bound_turns(const std::vector<GridGuide>& guides, double low, d
             places.push_back(guide.w_rad_s);
     sort_and_thin(places);
     std::vector<double> magnitudes;
+    magnitudes.reserve(places.size());
     for (const double w : places)
         magnitudes.push_back(magnitude_bound(w));
     const double highest = *std::max_element(magnitudes.begin(), magnitudes.end());
